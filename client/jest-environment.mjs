@@ -1,0 +1,22 @@
+import JsdomEnvironment from 'jest-environment-jsdom';
+
+/** jsdom leaves out what the API layer needs; Node has it. */
+const fromNode = [
+  'TextEncoder',
+  'TextDecoder',
+  'fetch',
+  'Request',
+  'Response',
+  'Headers',
+  'ReadableStream',
+  'WritableStream',
+  'TransformStream',
+  'structuredClone',
+];
+
+export default class BrowserEnvironment extends JsdomEnvironment.TestEnvironment {
+  async setup() {
+    await super.setup();
+    for (const name of fromNode) this.global[name] = globalThis[name];
+  }
+}

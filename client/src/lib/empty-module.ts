@@ -1,0 +1,2 @@
+/** Stands in for style sheets and drawings when components are tested. */
+export default '';
