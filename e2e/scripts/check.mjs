@@ -1,6 +1,7 @@
 // What every commit passes: format, build, lint, types.
 import { spawnSync } from 'node:child_process';
 
+/** @type {[string, string, string[]][]} */
 const steps = [
   ['format', 'npx', ['prettier', '--check', '--log-level', 'warn', '.']],
   ['build', 'node', ['server/scripts/build.mjs', '--node-only']],
