@@ -1,0 +1,2 @@
+/** Faults of `bill`: code → sentence. */
+export const billFaults = {} as const;

@@ -1,0 +1,2 @@
+/** Faults of `capture`: code → sentence. */
+export const captureFaults = {} as const;

@@ -1,0 +1,2 @@
+/** Faults of `cells`: code → sentence. */
+export const cellsFaults = {} as const;

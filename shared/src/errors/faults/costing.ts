@@ -1,0 +1,2 @@
+/** Faults of `costing`: code → sentence. */
+export const costingFaults = {} as const;

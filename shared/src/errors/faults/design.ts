@@ -1,0 +1,2 @@
+/** Faults of `design`: code → sentence. */
+export const designFaults = {} as const;

@@ -1,0 +1,2 @@
+/** Faults of `judge`: code → sentence. */
+export const judgeFaults = {} as const;

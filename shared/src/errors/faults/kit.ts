@@ -1,0 +1,2 @@
+/** Faults of `kit`: code → sentence. */
+export const kitFaults = {} as const;

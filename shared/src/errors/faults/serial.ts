@@ -1,0 +1,2 @@
+/** Faults of `serial`: code → sentence. */
+export const serialFaults = {} as const;

@@ -1,0 +1,2 @@
+/** Faults of `statistics`: code → sentence. */
+export const statisticsFaults = {} as const;

@@ -1,0 +1,2 @@
+/** Faults of `transport`: code → sentence. */
+export const transportFaults = {} as const;
