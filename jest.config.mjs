@@ -22,6 +22,12 @@ const swc = (parser) => [
   },
 ];
 
+/** Runs once, and only when a test of such a project is among those asked for. */
+const withDatabase = {
+  globalSetup: path('./e2e/scripts/database-setup.mjs'),
+  globalTeardown: path('./e2e/scripts/database-teardown.mjs'),
+};
+
 const node = (name, extra = {}) => ({
   displayName: name,
   rootDir: path(`./${name}`),
@@ -36,9 +42,9 @@ const node = (name, extra = {}) => ({
 export default {
   projects: [
     node('shared'),
-    node('db'),
+    node('db', withDatabase),
     node('fakes'),
-    node('server'),
+    node('server', withDatabase),
     {
       displayName: 'client',
       rootDir: path('./client'),

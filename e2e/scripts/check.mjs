@@ -1,10 +1,11 @@
-// What every commit passes: format, build, lint, types.
+// What every commit passes: format, build, generated files in step, lint, types.
 import { spawnSync } from 'node:child_process';
 
 /** @type {[string, string, string[]][]} */
 const steps = [
   ['format', 'npx', ['prettier', '--check', '--log-level', 'warn', '.']],
   ['build', 'node', ['server/scripts/build.mjs', '--node-only']],
+  ['generated database files', 'node', ['db/scripts/generate.mjs', '--check']],
   ['lint', 'npm', ['run', '-s', 'lint']],
   ['client types', 'npx', ['tsc', '-p', 'client']],
 ];
