@@ -55,6 +55,13 @@ export default {
       transform: { '^.+\\.tsx?$': swc({ tsx: true }) },
       setupFilesAfterEnv: [path('./client/jest-setup.ts')],
     },
+    {
+      displayName: 'scripts',
+      rootDir: path('./e2e/scripts'),
+      testEnvironment: 'node',
+      testMatch: ['<rootDir>/**/*.test.mjs'],
+      transform: {},
+    },
   ],
   reporters: ['default', path('./e2e/scripts/count-reporter.mjs')],
 };
