@@ -9,4 +9,12 @@ export const moneyFaults = {
   money_division_by_zero: 'A division by zero has no result.',
   money_weight_negative: 'Share {position} has a negative weight ({weight}).',
   money_no_weight: 'There is nothing to spread the amount over: all weights are zero.',
+  money_pool_broken: 'A stock of {quantity} cannot be worth {value} minor units.',
+  money_pool_empty: 'Nothing is held whose value could change.',
+  money_value_negative: 'A receipt cannot be worth {value} minor units.',
+  money_quantity_not_positive: 'The quantity {quantity} is not more than zero.',
+  money_more_than_held: 'Only {held} is held; {asked} cannot be issued.',
+  money_vat_rate_negative: 'A VAT rate of {rate} percent does not exist.',
+  money_vat_rate_for_category: 'VAT category {category} does not go with a rate of {rate} percent.',
+  money_vat_outside_scope_mixed: 'Lines outside the scope of VAT cannot stand on one document with other lines.',
 } as const;
