@@ -1,5 +1,5 @@
-import type { Decimal } from 'decimal.js';
-import { CalculationError } from '../errors/calculation-error.js';
+import { ArithmeticError } from '../errors/arithmetic-error.js';
+import { Decimal, type DecimalInput, decimal } from '../measure/decimal.js';
 
 /** Whatever names a part: its code or its identity in the store. The arithmetic only compares it. */
 export type PartKey = string;
@@ -7,7 +7,7 @@ export type PartKey = string;
 /** A part that may be fitted instead of the one that the line names. */
 export interface NamedAlternate {
   readonly part: PartKey;
-  /** How many of it (its own stock unit) stand in for one of the line's part. Above zero. */
+  /** How many of it (its own stock unit) stand in for one of the line's part. Above zero; usually 1. */
   readonly factor: Decimal;
   /** Lower is tried first; the line's own part comes before all of them. */
   readonly priority: number;
@@ -15,91 +15,86 @@ export interface NamedAlternate {
 
 /** One line of a bill: what goes into ONE stock unit of the bill's part. */
 export interface BillLine {
-  /** Names the line within its bill, for instance its position mark; unique there. */
+  /** Names the line within its bill; unique there. */
   readonly position: string;
   readonly part: PartKey;
-  /** In the component's stock unit per stock unit of the bill's part. Above zero. */
+  /** What stays in: in the component's stock unit per stock unit of the bill's part. Above zero. */
   readonly quantityPer: Decimal;
-  /**
-   * The share taken from the shelf on top of what goes in: 0.05 means that for 100 fitted, 105 are taken.
-   * At least zero.
-   */
-  readonly scrapAllowance: Decimal;
+  /** Share of what is taken that is normally lost: 0.05 means that of 100 taken, 95 go in. From 0 to below 1. */
+  readonly scrapShare: Decimal;
   readonly alternates: readonly NamedAlternate[];
+  /** Whether one unit may hold the line's part and its alternate side by side. By default each unit holds one kind. */
+  readonly alternatesMix?: boolean;
 }
 
 /** The bills in force, by the part they build. A part without a bill is bought. */
 export type Bills = ReadonlyMap<PartKey, readonly BillLine[]>;
 
-/** A way to fill a line: its own part or one of its alternates. */
-export interface LineOption {
-  readonly part: PartKey;
-  /** Taken from the shelf per stock unit of the bill's part, allowance included. In the option's stock unit. */
-  readonly takenPer: Decimal;
-}
+/**
+ * How finely each part is taken from the shelf: the number of decimals of its stock unit (0 for pieces).
+ * The ledger keeps six.
+ */
+export type IssueDecimals = (part: PartKey) => number;
+
+export const ledgerDecimals: IssueDecimals = () => 6;
 
 /**
- * What is taken from the shelf for one stock unit of the bill's part: quantity per × (1 + scrap allowance).
+ * What is taken from the shelf for one stock unit of the bill's part: quantity per / (1 − scrap share), not rounded.
  *
- * @returns in the component's stock unit, not rounded
+ * @returns in the component's stock unit; a division that does not end keeps 60 digits
+ * Source: scrap factor and yield factor add up to one; common practice, no source.
  */
 export function takenPerUnit(line: BillLine): Decimal {
-  return line.quantityPer.times(line.scrapAllowance.plus(1));
+  return line.quantityPer.div(new Decimal(1).minus(line.scrapShare));
+}
+
+/** The line's alternates, lower priority number first; equal ones in the order written. */
+export function alternatesInOrder(line: BillLine): NamedAlternate[] {
+  return line.alternates.toSorted((a, b) => a.priority - b.priority);
 }
 
 /**
- * The ways to fill a line, in the order in which they are tried: the line's own part, then its alternates by priority
- * (equal priorities in the order written).
+ * Takes a quantity into exact arithmetic.
+ *
+ * @param what names it in the fault's sentence
+ * @throws ArithmeticError `bill_quantity_negative`, and as `decimal`
  */
-export function lineOptions(line: BillLine): LineOption[] {
-  const own = takenPerUnit(line);
-  const alternates = line.alternates.toSorted((a, b) => a.priority - b.priority);
-  return [
-    { part: line.part, takenPer: own },
-    ...alternates.map(({ part, factor }) => ({ part, takenPer: own.times(factor) })),
-  ];
+export function quantityFrom(value: DecimalInput, what: string): Decimal {
+  const quantity = decimal(value);
+  if (quantity.lessThan(0)) throw new ArithmeticError('bill_quantity_negative', { what, value: quantity.toFixed() });
+  return quantity;
 }
 
 /**
  * Refuses a bill whose lines cannot be computed with.
  *
- * @throws CalculationError `bill_line_invalid` (quantity or factor not above zero, allowance negative, not finite) |
- *   `bill_line_repeated` (a position or an alternate twice)
+ * @throws ArithmeticError `bill_line_without_quantity` | `bill_line_all_scrap` | `bill_line_factor` |
+ *   `bill_line_repeated` (a position twice, or an alternate twice on a line)
  */
 export function checkBillLines(part: PartKey, lines: readonly BillLine[]): void {
   const positions = new Set<string>();
   for (const line of lines) {
-    if (positions.has(line.position)) throw repeated(part, line, line.position);
+    const place = { part, position: line.position };
+    if (positions.has(line.position))
+      throw new ArithmeticError('bill_line_repeated', { ...place, what: 'the position' });
     positions.add(line.position);
-    if (!isAboveZero(line.quantityPer)) throw invalid(part, line, 'quantity per must be above zero');
-    if (!line.scrapAllowance.isFinite() || line.scrapAllowance.lessThan(0)) {
-      throw invalid(part, line, 'scrap allowance must not be negative');
+    if (!isAboveZero(line.quantityPer)) throw new ArithmeticError('bill_line_without_quantity', place);
+    if (!(line.scrapShare.greaterThanOrEqualTo(0) && line.scrapShare.lessThan(1))) {
+      throw new ArithmeticError('bill_line_all_scrap', { ...place, share: line.scrapShare.toString() });
     }
-    const seen = new Set([line.part]);
-    for (const alternate of line.alternates) {
-      if (seen.has(alternate.part)) throw repeated(part, line, alternate.part);
-      seen.add(alternate.part);
-      if (!isAboveZero(alternate.factor)) throw invalid(part, line, 'factor of an alternate must be above zero');
-    }
+    checkAlternates(line, place);
+  }
+}
+
+function checkAlternates(line: BillLine, place: { part: PartKey; position: string }): void {
+  const seen = new Set([line.part]);
+  for (const { part, factor } of line.alternates) {
+    if (seen.has(part)) throw new ArithmeticError('bill_line_repeated', { ...place, what: part });
+    seen.add(part);
+    if (!isAboveZero(factor)) throw new ArithmeticError('bill_line_factor', { ...place, alternate: part });
   }
 }
 
 function isAboveZero(value: Decimal): boolean {
   return value.isFinite() && value.greaterThan(0);
-}
-
-function invalid(part: PartKey, line: BillLine, reason: string): CalculationError {
-  return new CalculationError('bill_line_invalid', `Bill of ${part}, line ${line.position}: ${reason}.`, {
-    part,
-    position: line.position,
-    reason,
-  });
-}
-
-function repeated(part: PartKey, line: BillLine, what: string): CalculationError {
-  return new CalculationError('bill_line_repeated', `Bill of ${part}, line ${line.position}: ${what} stands twice.`, {
-    part,
-    position: line.position,
-    what,
-  });
 }

@@ -1,4 +1,4 @@
-import { Exact } from '../measure/exact.js';
+import { Decimal } from '../measure/decimal.js';
 import type { BillLine, Bills, NamedAlternate } from './bill-lines.js';
 
 /** Short forms for writing bills in examples and tests: `line('R1', 'resistor', 2, { scrap: '0.05' })`. */
@@ -11,14 +11,14 @@ export function line(
   return {
     position,
     part,
-    quantityPer: new Exact(quantityPer),
-    scrapAllowance: new Exact(more.scrap ?? 0),
+    quantityPer: new Decimal(quantityPer),
+    scrapShare: new Decimal(more.scrap ?? 0),
     alternates: more.alternates ?? [],
   };
 }
 
 export function alternate(part: string, priority = 1, factor: string | number = 1): NamedAlternate {
-  return { part, priority, factor: new Exact(factor) };
+  return { part, priority, factor: new Decimal(factor) };
 }
 
 /** `bills({ A: [['B', 2], ['C', 3]] })`: positions are counted from 1. */

@@ -15,7 +15,7 @@ describe('comparison of two revisions', () => {
     const [before] = [line('1', 'screw', 2)];
     const after = line('1', 'screw', 3, { scrap: '0.1', alternates: [alternate('bolt')] });
     expect(compareBills([before], [after])).toEqual([
-      { kind: 'changed', before, after, fields: ['quantityPer', 'scrapAllowance', 'alternates'] },
+      { kind: 'changed', before, after, fields: ['quantityPer', 'scrapShare', 'alternates'] },
     ]);
   });
 

@@ -1,6 +1,6 @@
 import type { BillLine, NamedAlternate } from './bill-lines.js';
 
-export type LineField = 'position' | 'part' | 'quantityPer' | 'scrapAllowance' | 'alternates';
+export type LineField = 'position' | 'part' | 'quantityPer' | 'scrapShare' | 'alternates';
 
 export type LineChange =
   | { readonly kind: 'added'; readonly after: BillLine }
@@ -67,7 +67,7 @@ function changedFields(before: BillLine, after: BillLine): LineField[] {
   if (before.position !== after.position) fields.push('position');
   if (before.part !== after.part) fields.push('part');
   if (!before.quantityPer.equals(after.quantityPer)) fields.push('quantityPer');
-  if (!before.scrapAllowance.equals(after.scrapAllowance)) fields.push('scrapAllowance');
+  if (!before.scrapShare.equals(after.scrapShare)) fields.push('scrapShare');
   if (alternatesText(before.alternates) !== alternatesText(after.alternates)) fields.push('alternates');
   return fields;
 }

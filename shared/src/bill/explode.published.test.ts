@@ -1,5 +1,5 @@
 import { describe, expect, test } from '@jest/globals';
-import { CalculationError } from '../errors/calculation-error.js';
+import { ArithmeticError } from '../errors/arithmetic-error.js';
 import { bills } from './bill.builders.js';
 import { explode } from './explode.js';
 import { lowLevelCodes } from './low-level-codes.js';
@@ -75,7 +75,7 @@ describe('explosion and low-level codes against published structures', () => {
 
   test('a cycle is refused and named: constructed, no published source', () => {
     const rows = bills({ P: [['Q', 1]], Q: [['R', 1]], R: [['P', 1]] });
-    expect(() => explode(rows, 'P', 1)).toThrow(CalculationError);
+    expect(() => explode(rows, 'P', 1)).toThrow(ArithmeticError);
     expect(() => explode(rows, 'P', 1)).toThrow('P → Q → R → P');
   });
 });

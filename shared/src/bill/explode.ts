@@ -1,9 +1,17 @@
-import type { Decimal } from 'decimal.js';
-import { CalculationError } from '../errors/calculation-error.js';
-import { Exact, nonNegativeQuantity } from '../measure/exact.js';
-import { type Bills, type BillLine, type PartKey, checkBillLines, takenPerUnit } from './bill-lines.js';
+import { ArithmeticError } from '../errors/arithmetic-error.js';
+import { Decimal, type DecimalInput } from '../measure/decimal.js';
+import {
+  type BillLine,
+  type Bills,
+  type IssueDecimals,
+  type PartKey,
+  checkBillLines,
+  ledgerDecimals,
+  quantityFrom,
+  takenPerUnit,
+} from './bill-lines.js';
 import { lowLevelCodes } from './low-level-codes.js';
-import { type IssueDecimals, issueQuantity } from './requirement.js';
+import { issueQuantity } from './requirement.js';
 
 export interface Requirement {
   readonly part: PartKey;
@@ -22,30 +30,29 @@ export interface Requirement {
  * @param bills the bills in force
  * @param part what is built
  * @param quantity of it, in its stock unit
- * @param decimals how finely each part is taken; by default nothing is rounded
+ * @param decimals how finely each part is taken; by default to the six decimals of the ledger
  * @returns one row per part, in order of level, the exploded part left out
- * @throws CalculationError `bill_cycle` | `bill_line_invalid` | `bill_line_repeated` | `not_a_number` |
- *   `negative_quantity`
+ * @throws ArithmeticError `bill_cycle` | `bill_quantity_negative`, and as `checkBillLines` and `decimal`
  * Source: common practice, no source (explosion in order of low-level codes).
  */
 export function explode(
   bills: Bills,
   part: PartKey,
-  quantity: Decimal.Value,
-  decimals: IssueDecimals = () => undefined,
+  quantity: DecimalInput,
+  decimals: IssueDecimals = ledgerDecimals,
 ): Requirement[] {
   const below = billsBelow(bills, part);
-  const need = new Map<PartKey, Decimal>([[part, nonNegativeQuantity(quantity, 'quantity')]]);
+  const need = new Map<PartKey, Decimal>([[part, quantityFrom(quantity, 'quantity')]]);
   const levels = lowLevelCodes(below);
   for (const parent of levels.keys()) {
     for (const line of below.get(parent) ?? []) {
-      const taken = issueQuantity(need.get(parent) ?? 0, takenPerUnit(line), decimals(line.part));
+      const taken = issueQuantity(need.get(parent) ?? 0, line, decimals(line.part));
       need.set(line.part, taken.plus(need.get(line.part) ?? 0));
     }
   }
   return [...levels]
     .filter(([key]) => key !== part)
-    .map(([key, level]) => ({ part: key, level, quantity: need.get(key) ?? new Exact(0), made: below.has(key) }));
+    .map(([key, level]) => ({ part: key, level, quantity: need.get(key) ?? new Decimal(0), made: below.has(key) }));
 }
 
 /** The bills that can be reached from a part, alternates left aside; each checked. */
@@ -80,24 +87,16 @@ export interface IndentedRow {
  * Explodes a bill as an indented list: one row per place, in the order in which the lines are written.
  *
  * @param rowLimit refuses to write out more rows than this, since shared sub-assemblies multiply
- * @throws CalculationError as `explode`, and `explosion_too_large`
+ * @throws ArithmeticError as `explode`, and `bill_too_many_places`
  */
-export function explodeIndented(
-  bills: Bills,
-  part: PartKey,
-  quantity: Decimal.Value,
-  rowLimit = 20_000,
-): IndentedRow[] {
+export function explodeIndented(bills: Bills, part: PartKey, quantity: DecimalInput, rowLimit = 20_000): IndentedRow[] {
   const below = billsBelow(bills, part);
   lowLevelCodes(below);
   const rows: IndentedRow[] = [];
   const walk = (parent: PartKey, amount: Decimal, path: readonly string[]): void => {
     for (const line of below.get(parent) ?? []) {
       if (rows.length >= rowLimit) {
-        throw new CalculationError('explosion_too_large', `The bill of ${part} has more than ${rowLimit} places.`, {
-          part,
-          limit: rowLimit,
-        });
+        throw new ArithmeticError('bill_too_many_places', { part, limit: rowLimit });
       }
       const here = [...path, line.position];
       const taken = amount.times(takenPerUnit(line));
@@ -106,6 +105,6 @@ export function explodeIndented(
       walk(component, taken, here);
     }
   };
-  walk(part, nonNegativeQuantity(quantity, 'quantity'), []);
+  walk(part, quantityFrom(quantity, 'quantity'), []);
   return rows;
 }

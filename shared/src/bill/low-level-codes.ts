@@ -1,4 +1,4 @@
-import { CalculationError } from '../errors/calculation-error.js';
+import { ArithmeticError } from '../errors/arithmetic-error.js';
 import type { Bills, PartKey } from './bill-lines.js';
 
 /**
@@ -8,7 +8,7 @@ import type { Bills, PartKey } from './bill-lines.js';
  *
  * @param bills all bills that matter
  * @returns code by part, in ascending order of code; 0 for parts in no bill
- * @throws CalculationError `bill_cycle` with `parts`: the cycle, its first part repeated at the end
+ * @throws ArithmeticError `bill_cycle`; its detail `cycle` is the way round, the first part repeated at the end
  * Source: common practice, no source (longest path in an acyclic graph by removal of parts without parents).
  */
 export function lowLevelCodes(bills: Bills): ReadonlyMap<PartKey, number> {
@@ -49,7 +49,7 @@ function countParents(components: ReadonlyMap<PartKey, ReadonlySet<PartKey>>): M
 }
 
 /** Every part left over has a parent left over; walking upward must come back to a part already met. */
-function cycleFault(components: ReadonlyMap<PartKey, ReadonlySet<PartKey>>, done: Set<PartKey>): CalculationError {
+function cycleFault(components: ReadonlyMap<PartKey, ReadonlySet<PartKey>>, done: Set<PartKey>): ArithmeticError {
   const parentOf = new Map<PartKey, PartKey>();
   for (const [part, set] of components) {
     if (done.has(part)) continue;
@@ -65,6 +65,5 @@ function cycleFault(components: ReadonlyMap<PartKey, ReadonlySet<PartKey>>, done
   const order = [...components.keys()];
   const first = cycle.indexOf(cycle.toSorted((a, b) => order.indexOf(a) - order.indexOf(b))[0] ?? '');
   const rotated = [...cycle.slice(first), ...cycle.slice(0, first)];
-  const parts = [...rotated, ...rotated.slice(0, 1)];
-  return new CalculationError('bill_cycle', `A bill contains itself: ${parts.join(' → ')}.`, { parts });
+  return new ArithmeticError('bill_cycle', { cycle: [...rotated, ...rotated.slice(0, 1)].join(' → ') });
 }
