@@ -1,22 +1,19 @@
 // Private PostgreSQL clusters on the loopback address. Node alone: this runs before the dependencies are installed.
-import { spawn, spawnSync } from 'node:child_process';
-import { existsSync, mkdtempSync } from 'node:fs';
+import { spawnSync } from 'node:child_process';
+import { existsSync, mkdtempSync, rmSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { fileURLToPath } from 'node:url';
-import { ensureBinaries, findBinaries } from './cluster-binaries.mjs';
+import { ensureBinaries } from './cluster-binaries.mjs';
+import { startGuard } from './guard.mjs';
 
-export { ensureBinaries, findBinaries };
+/** The product's two are named as in db/src/roles.ts, which cannot be read before it is built. */
+export const roles = { admin: 'emberlot_admin', owner: 'emberlot_owner', server: 'emberlot_server' };
 
-const adminRole = 'emberlot_admin';
-/** The same names as in db/src/roles.ts, which cannot be read before it is built. */
-const productRoles = ['emberlot_owner', 'emberlot_server'];
-
-const isRoot = process.getuid?.() === 0;
+export const isRoot = process.getuid?.() === 0;
 
 /** PostgreSQL refuses to run as root, so root lends it the account that Debian's package makes. */
-function asClusterUser(command, args) {
+export function asClusterUser(command, args) {
   return isRoot
     ? ['setpriv', ['--reuid=postgres', '--regid=postgres', '--init-groups', '--', command, ...args]]
     : [command, args];
@@ -59,23 +56,24 @@ export async function freePort(preferred = 0) {
   return listen(preferred).catch(() => listen(0));
 }
 
-/** Makes the data folder. With a password, that is asked of everyone who connects; without, anyone on the machine may. */
-export function initialise({ binaries, data, password, settings }) {
-  const access = password ? ['-A', 'scram-sha-256', '--pwfile=/dev/stdin'] : ['-A', 'trust'];
-  const args = ['-D', data, '-U', adminRole, ...access, '-E', 'UTF8', '--locale=C.UTF-8', '--no-instructions'];
-  const result = run(join(binaries, 'initdb'), args, {
-    stdio: [password ? 'pipe' : 'ignore', 'ignore', 'pipe'],
-    input: password,
-    encoding: 'utf8',
-  });
-  if (result.status !== 0) throw new Error(`PostgreSQL could not make its data folder ${data}: ${result.stderr}`);
-  const lines = [...commonSettings, ...settings].join('\n');
-  appendAsClusterUser(join(data, 'postgresql.conf'), `\n# Emberlot\n${lines}\n`);
+/** Writes a file as the account PostgreSQL runs as, for that account's eyes only. */
+function writeAsClusterUser(file, text, mode = '>') {
+  const script = `umask 077; cat ${mode} "$0"`;
+  const result = run('sh', ['-c', script, file], { stdio: ['pipe', 'ignore', 'ignore'], input: text });
+  if (result.status !== 0) throw new Error(`${file} could not be written`);
 }
 
-function appendAsClusterUser(file, text) {
-  const result = run('tee', ['-a', file], { stdio: ['pipe', 'ignore', 'ignore'], input: text });
-  if (result.status !== 0) throw new Error(`${file} could not be written`);
+/** Makes the data folder. With a password, that is asked of everyone who connects; without, anyone on the machine may. */
+export function initialise({ binaries, data, password, settings }) {
+  const passwordFile = `${data}.password`;
+  if (password) writeAsClusterUser(passwordFile, password);
+  const access = password ? ['-A', 'scram-sha-256', `--pwfile=${passwordFile}`] : ['-A', 'trust'];
+  const args = ['-D', data, '-U', roles.admin, ...access, '-E', 'UTF8', '--locale=C.UTF-8', '--no-instructions'];
+  const result = run(join(binaries, 'initdb'), args, { stdio: ['ignore', 'ignore', 'pipe'], encoding: 'utf8' });
+  rmSync(passwordFile, { force: true });
+  if (result.status !== 0) throw new Error(`PostgreSQL could not make its data folder ${data}: ${result.stderr}`);
+  const lines = [...commonSettings, ...settings].join('\n');
+  writeAsClusterUser(join(data, 'postgresql.conf'), `\n# Emberlot\n${lines}\n`, '>>');
 }
 
 /** @returns {Promise<number>} the port it listens on */
@@ -108,7 +106,7 @@ export function stopServer({ binaries, data, mode = 'fast' }) {
 /** Sends statements as the cluster's administrator; answers what they return, a line a row. */
 export function runSql({ binaries, port, password, sql, database = 'postgres' }) {
   const args = ['-X', '-q', '-A', '-t', '-v', 'ON_ERROR_STOP=1', '-h', '127.0.0.1', '-p', String(port)];
-  const result = spawnSync(join(binaries, 'psql'), [...args, '-U', adminRole, '-d', database], {
+  const result = spawnSync(join(binaries, 'psql'), [...args, '-U', roles.admin, '-d', database], {
     input: sql,
     encoding: 'utf8',
     env: { ...process.env, PGPASSWORD: password ?? '' },
@@ -119,10 +117,10 @@ export function runSql({ binaries, port, password, sql, database = 'postgres' })
 
 /** Creates the product's two roles where they are missing. */
 export function ensureRoles({ binaries, port, password, rolePasswords = {} }) {
-  const statements = productRoles.map((role) => {
-    const secret = rolePasswords[role] ? ` password '${rolePasswords[role]}'` : '';
+  const statements = [roles.owner, roles.server].map((role) => {
+    const secret = rolePasswords[role] ? ` with login password '${rolePasswords[role]}'` : ' with login';
     return `select 'create role ${role} login' where not exists (select from pg_roles where rolname = '${role}') \\gexec
-alter role ${role} login${secret};`;
+alter role ${role}${secret};`;
   });
   runSql({ binaries, port, password, sql: statements.join('\n') });
 }
@@ -133,39 +131,25 @@ export function connectionUrl({ user, password, port, database }) {
 }
 
 /**
- * A cluster for tests. A guard process of its own removes it when this process ends, however that comes about.
+ * A cluster for tests; it is removed when this process ends, however that comes about.
  * @param {(text: string) => void} [report]
  * @returns {Promise<{ adminUrl: string, stop: () => Promise<void> }>}
  */
 export async function startThrowAwayCluster(report = () => {}) {
   const binaries = ensureBinaries(report);
   const folder = mkdtempSync(join(existsSync('/var/tmp') ? '/var/tmp' : tmpdir(), 'emberlot-test-'));
-  if (isRoot) spawnSync('chown', ['postgres:postgres', folder]);
   const data = join(folder, 'data');
-  const guard = spawn(
-    process.execPath,
-    [fileURLToPath(new URL('cluster-guard.mjs', import.meta.url)), binaries, folder],
-    {
-      stdio: ['pipe', 'ignore', 'inherit'],
-      detached: true,
-      cwd: '/',
-    },
-  );
-  const ended = new Promise((resolve) => guard.once('exit', resolve));
-  guard.unref();
-  guard.stdin.unref?.();
-  const stop = async () => {
-    guard.ref();
-    guard.stdin.end();
-    await ended;
-  };
+  const guard = startGuard();
+  guard.entrust({ folder });
+  guard.entrust({ cluster: { binaries, data, mode: 'immediate' } });
   try {
+    if (isRoot) spawnSync('chown', ['postgres:postgres', folder]);
     initialise({ binaries, data, settings: throwAwaySettings });
     const port = await startServer({ binaries, data, log: join(folder, 'log') });
     ensureRoles({ binaries, port });
-    return { adminUrl: connectionUrl({ user: adminRole, port, database: 'postgres' }), stop };
+    return { adminUrl: connectionUrl({ user: roles.admin, port, database: 'postgres' }), stop: () => guard.end() };
   } catch (error) {
-    await stop();
+    await guard.end();
     throw error;
   }
 }

@@ -7,7 +7,7 @@ import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import { join, resolve } from 'node:path';
 import { fileURLToPath, pathToFileURL } from 'node:url';
-import { findBinaries } from './cluster.mjs';
+import { findBinaries } from './cluster-binaries.mjs';
 import { withCluster } from './with-cluster.mjs';
 
 const root = resolve(fileURLToPath(import.meta.url), '../../..');

@@ -1,0 +1,80 @@
+// The programs that npm start and npm run dev both run. Node alone.
+import { spawn } from 'node:child_process';
+import { join } from 'node:path';
+import { pathToFileURL } from 'node:url';
+import { fakesEnvironment } from './local-settings.mjs';
+import { startProcess, untilAnswers } from './processes.mjs';
+import { remark } from './progress.mjs';
+import { root } from './root.mjs';
+
+export const logFile = (name) => join(root, '.local/log', `${name}.log`);
+
+/** Runs a program of ours to its end, its output on the terminal. */
+export function runNode(args, env = process.env) {
+  return new Promise((resolve, reject) => {
+    const child = spawn(process.execPath, args, { cwd: root, env, stdio: ['ignore', 'inherit', 'inherit'] });
+    child.once('error', reject);
+    child.once('exit', (code) => (code === 0 ? resolve() : reject(new Error(`${args[0]} failed.`))));
+  });
+}
+
+export async function startFakes({ ports, secrets, guard }) {
+  const fakes = startProcess({
+    name: 'The stand-ins for payments and mail',
+    args: [join(root, 'fakes/dist/main.js')],
+    cwd: root,
+    env: fakesEnvironment({ ports, secrets, state: join(root, '.local/fakes') }),
+    log: logFile('fakes'),
+    guard,
+  });
+  await untilAnswers(`http://127.0.0.1:${ports.mailPage}/`, fakes);
+  return fakes;
+}
+
+export async function startServer({ env, guard, options = [] }) {
+  const server = startProcess({
+    name: 'The server',
+    args: ['--enable-source-maps', ...options, join(root, 'server/dist/main.js')],
+    cwd: root,
+    env,
+    log: logFile('server'),
+    guard,
+  });
+  await untilAnswers(`http://127.0.0.1:${env.PORT}/api/health/ready`, server);
+  return server;
+}
+
+export async function loadDemo(serverUrl, settings) {
+  remark('loading the demo: six months of a small shop');
+  await runNode([join(root, 'server/dist/demo/load.js')], { ...settings, DATABASE_URL: serverUrl });
+}
+
+/** One line a person of the demo. */
+export async function demoSignIns() {
+  const { demoSignIns: list } = await import(pathToFileURL(join(root, 'server/dist/demo/sign-ins.js')).href);
+  return list.map(({ role, email, password }) => `    ${role.padEnd(11)} ${email.padEnd(36)} ${password}`);
+}
+
+/** Resolves when the person at the terminal, or whoever runs this, asks for the end. */
+export const askedToStop = new Promise((resolve) => {
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => resolve('stopped'));
+});
+
+/**
+ * Waits for the end: asked for, or because a program ended by itself.
+ * @returns {Promise<number>} exit code
+ */
+export async function untilStopped(bringingUp) {
+  const children = await Promise.race([bringingUp, askedToStop]);
+  if (children === 'stopped') {
+    // What it was doing is being taken away beneath it; its fault tells nothing.
+    bringingUp.catch(() => {});
+    return 0;
+  }
+  const ends = children.map((child) => child.exited.then((outcome) => ({ child, outcome })));
+  const first = await Promise.race([...ends, askedToStop]);
+  if (first === 'stopped') return 0;
+  const { child, outcome } = first;
+  console.error(`${child.name} ended by itself (${outcome}). The end of ${child.log}:\n${child.tail()}`);
+  return 1;
+}
