@@ -63,5 +63,6 @@ export default {
       transform: {},
     },
   ],
+  testSequencer: path('./e2e/scripts/shuffle-sequencer.mjs'),
   reporters: ['default', path('./e2e/scripts/count-reporter.mjs')],
 };
