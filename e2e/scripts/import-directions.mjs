@@ -31,7 +31,7 @@ const clientLayers = {
 };
 
 /** What `shared` may take from outside: it runs in the browser and on the server alike. */
-const sharedPackages = ['decimal.js'];
+const sharedPackages = ['decimal.js', 'jsvat', 'mathjs'];
 
 const isSpec = (file) => /\.(test|spec)\.tsx?$/.test(file);
 /** Specs and what they are set up with may reach anywhere within their workspace. */
