@@ -13,11 +13,11 @@ const workspaces = {
 /** Rows of the server from the ground up; a folder imports from its own row and those before it. */
 const serverRows = [
   ['platform'],
-  ['people', 'parts', 'suppliers', 'bills'],
+  ['people', 'settings', 'parts', 'suppliers', 'bills'],
   ['stock', 'journal', 'invoicing'],
-  ['planning', 'purchasing', 'builds', 'units', 'testing'],
+  ['planning', 'purchasing', 'builds', 'units', 'testing', 'imports'],
   ['catalogue', 'orders', 'payments', 'shipping', 'returns', 'recalls'],
-  ['books'],
+  ['books', 'today', 'find'],
   ['demo'],
 ];
 
