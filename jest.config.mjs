@@ -57,9 +57,10 @@ export default {
     },
     {
       displayName: 'scripts',
-      rootDir: path('./e2e/scripts'),
+      rootDir: path('.'),
+      roots: ['db', 'server', 'e2e'].map((workspace) => path(`./${workspace}/scripts`)),
       testEnvironment: 'node',
-      testMatch: ['<rootDir>/**/*.test.mjs'],
+      testMatch: ['**/*.test.mjs'],
       transform: {},
     },
   ],
