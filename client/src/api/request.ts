@@ -1,6 +1,5 @@
+import { apiUrl, type Query } from '../lib/api-url';
 import { send } from './send';
-
-type Query = Record<string, string | number | boolean | undefined | null>;
 
 export interface RequestOptions {
   query?: Query;
@@ -8,16 +7,6 @@ export interface RequestOptions {
   /** Of a creating call, so that sending it twice makes one thing. */
   idempotencyKey?: string;
   signal?: AbortSignal;
-}
-
-/** An address under `/api` with its query; empty values are left out. */
-export function apiUrl(path: string, query: Query = {}): string {
-  const search = new URLSearchParams();
-  for (const [name, value] of Object.entries(query)) {
-    if (value !== undefined && value !== null && value !== '') search.set(name, String(value));
-  }
-  const text = search.toString();
-  return text ? `${path}?${text}` : path;
 }
 
 /**

@@ -1,4 +1,4 @@
-import { ApiProblem, problemOf, unreachable } from './problem';
+import { ApiProblem, problemOf, unreachable } from '../lib/problem';
 
 /**
  * The one function that talks to the server. It adds the form-protection token, asks for a new one once if the server

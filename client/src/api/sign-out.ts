@@ -1,6 +1,6 @@
 import { discardDrafts } from '../lib/drafts';
 import { notify } from '../lib/notify';
-import { sentenceOf } from './problem';
+import { sentenceOf } from '../lib/problem';
 import { request } from './request';
 
 /** Ends the session and leaves nothing of the person in this browser: the page is loaded afresh. */

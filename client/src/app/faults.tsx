@@ -1,7 +1,7 @@
 import Button from '@mui/material/Button';
 import type { ReactElement } from 'react';
 import { Link, useRouteError } from 'react-router-dom';
-import { sentenceOf } from '../api/problem';
+import { sentenceOf } from '../lib/problem';
 import { PageHeading } from '../components/page-heading';
 import { NotAllowed } from './access';
 

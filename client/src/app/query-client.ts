@@ -1,5 +1,5 @@
 import { MutationCache, QueryClient, type QueryKey } from '@tanstack/react-query';
-import { ApiProblem, sentenceOf } from '../api/problem';
+import { ApiProblem, sentenceOf } from '../lib/problem';
 import { notify } from '../lib/notify';
 
 declare module '@tanstack/react-query' {

@@ -5,7 +5,7 @@ import DialogContent from '@mui/material/DialogContent';
 import DialogTitle from '@mui/material/DialogTitle';
 import Typography from '@mui/material/Typography';
 import { useId, useState, type ReactElement, type ReactNode } from 'react';
-import { sentenceOf } from '../api/problem';
+import { sentenceOf } from '../lib/problem';
 
 interface ConfirmDialogProps {
   open: boolean;

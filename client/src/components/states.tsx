@@ -3,7 +3,7 @@ import Skeleton from '@mui/material/Skeleton';
 import { styled } from '@mui/material/styles';
 import Typography from '@mui/material/Typography';
 import type { ReactElement, ReactNode } from 'react';
-import { sentenceOf } from '../api/problem';
+import { sentenceOf } from '../lib/problem';
 
 const Place = styled('div')(({ theme }) => ({
   padding: '32px 20px',

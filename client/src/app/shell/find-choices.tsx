@@ -1,5 +1,5 @@
 import type { ReactElement } from 'react';
-import { sentenceOf } from '../../api/problem';
+import { sentenceOf } from '../../lib/problem';
 import { Tag } from '../../components/tag/tag';
 import type { Found } from './find-recent';
 import { Choices } from './find-look';
@@ -22,9 +22,9 @@ export function FindChoices({ id, choices, active, onChoose, recent, pending, er
       <div role="listbox" id={id} aria-label={recent ? 'Where you were' : 'Found'}>
         {choices.map((found, place) => (
           // The focus stays in the field, which answers the keys; the pointer may press a line.
-          // oxlint-disable-next-line jsx-a11y/prefer-tag-over-role -- as above
           <div
             key={found.to}
+            // oxlint-disable-next-line jsx-a11y/prefer-tag-over-role -- as above
             role="option"
             tabIndex={-1}
             id={`${id}-${place}`}

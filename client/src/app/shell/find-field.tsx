@@ -1,7 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { useEffect, useId, useRef, useState, type KeyboardEvent, type ReactElement } from 'react';
 import { useNavigate } from 'react-router-dom';
-import { sentenceOf } from '../../api/problem';
+import { sentenceOf } from '../../lib/problem';
 import type { StaffRole } from '../../lib/area';
 import { isTyping } from '../../lib/keyboard';
 import { notify } from '../../lib/notify';

@@ -2,7 +2,7 @@ import Button from '@mui/material/Button';
 import { styled } from '@mui/material/styles';
 import { useState, type FormEvent, type ReactElement, type ReactNode } from 'react';
 import { FormProvider, type FieldValues } from 'react-hook-form';
-import { ApiProblem, sentenceOf } from '../../api/problem';
+import { ApiProblem, sentenceOf } from '../../lib/problem';
 import { ErrorSummary } from './error-summary';
 import { FieldNames } from './field-names';
 import { placeFaults } from './server-faults';

@@ -1,5 +1,5 @@
 import type { FieldErrors, FieldValues, Path, UseFormReturn } from 'react-hook-form';
-import type { ApiProblem, FieldFault } from '../../api/problem';
+import type { ApiProblem, FieldFault } from '../../lib/problem';
 
 /** `/lines/0/quantity` as react-hook-form names it: `lines.0.quantity` (JSON pointer, RFC 6901). */
 export function fieldOfPointer(pointer: string): string {

@@ -1,7 +1,7 @@
 import Link from '@mui/material/Link';
 import { styled } from '@mui/material/styles';
 import type { ReactElement } from 'react';
-import { apiUrl } from '../../api/request';
+import { apiUrl } from '../../lib/api-url';
 import { formatCount } from '../../lib/format-quantity';
 import { ColumnChoiceButton, type ColumnChoice } from './column-choice';
 import { FilterChips } from './filter-chips';
