@@ -57,13 +57,11 @@ export default {
     },
     {
       displayName: 'scripts',
-      rootDir: path('.'),
-      roots: ['db', 'server', 'e2e'].map((workspace) => path(`./${workspace}/scripts`)),
+      rootDir: path('./e2e/scripts'),
       testEnvironment: 'node',
-      testMatch: ['**/*.test.mjs'],
+      testMatch: ['<rootDir>/**/*.test.mjs'],
       transform: {},
     },
   ],
-  testSequencer: path('./e2e/scripts/shuffle-sequencer.mjs'),
   reporters: ['default', path('./e2e/scripts/count-reporter.mjs')],
 };

@@ -11,7 +11,7 @@ revoke update, delete, truncate on
   invoice, invoice_line, invoice_charge, invoice_vat,
   batch_issue, batch_cost, reading, rework,
   order_cancellation, order_invoice, payment, payment_event,
-  audit_entry
+  audit_entry, file_object, file_chunk
 from emberlot_server;
 
 -- Kept by triggers.
@@ -26,3 +26,26 @@ revoke delete, truncate on
   as_built, nonconformity, demand, reservation, bill_revision, part, customer, app_user, period, number_series
 from emberlot_server;
 grant delete on bill_revision, part to emberlot_server;
+
+-- The job queue lives in a schema of its own, kept by its library; its tables admit nobody but their owner until a
+-- policy says so.
+grant usage on schema graphile_worker to emberlot_server;
+grant select, insert, update, delete on all tables in schema graphile_worker to emberlot_server;
+grant usage, select on all sequences in schema graphile_worker to emberlot_server;
+grant execute on all functions in schema graphile_worker to emberlot_server;
+revoke insert, update, delete on graphile_worker.migrations from emberlot_server;
+do $$
+declare
+  queue_table text;
+begin
+  for queue_table in
+    select tablename from pg_tables where schemaname = 'graphile_worker' and rowsecurity
+  loop
+    execute format('drop policy if exists emberlot_server_works on graphile_worker.%I', queue_table);
+    execute format(
+      'create policy emberlot_server_works on graphile_worker.%I to emberlot_server using (true) with check (true)',
+      queue_table
+    );
+  end loop;
+end
+$$;

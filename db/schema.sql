@@ -88,14 +88,6 @@ declare
 begin
   if tg_table_name = 'stock_move' then
     touched := new.document_id;
-    -- A document of many moves is added up once, for its last move of this transaction, whose own check is still to
-    -- come; else opening stock of thousands of lots would be added up thousands of times.
-    if exists (
-      select 1 from stock_move
-      where document_id = touched and id > new.id and xmin = pg_current_xact_id()::xid
-    ) then
-      return null;
-    end if;
   else
     select document_id into touched from journal_entry where id = new.entry_id;
   end if;
@@ -221,17 +213,6 @@ begin
   return new;
 end $$;
 
-CREATE FUNCTION public.part_stays_as_moved() RETURNS trigger
-    LANGUAGE plpgsql
-    AS $$
-begin
-  if exists (select 1 from stock_move where part_id = new.id) then
-    raise exception 'part % has moved: its measure and how closely it is followed stay', new.code
-      using errcode = '23514', constraint = 'part_stays_as_moved';
-  end if;
-  return new;
-end $$;
-
 CREATE FUNCTION public.refund_within_payment() RETURNS trigger
     LANGUAGE plpgsql SECURITY DEFINER
     SET search_path TO 'public'
@@ -348,13 +329,13 @@ CREATE TABLE public.account (
 COMMENT ON TABLE public.account IS 'An account of the journal. The stock accounts together carry the value of the shelf.';
 
 CREATE TABLE public.app_user (
-    id integer NOT NULL,
+    id bigint NOT NULL,
     email text NOT NULL,
     name text NOT NULL,
     role text NOT NULL,
     status text NOT NULL,
     password_hash text,
-    customer_id integer,
+    customer_id bigint,
     email_confirmed_at timestamp with time zone,
     created_at timestamp with time zone NOT NULL,
     version integer DEFAULT 1 NOT NULL,
@@ -422,14 +403,14 @@ COMMENT ON TABLE public.attempt_count IS 'How often something was tried for one 
 COMMENT ON COLUMN public.attempt_count.bucket IS 'What is counted and a digest of for whom: no address or name in clear.';
 
 CREATE TABLE public.audit_entry (
-    id integer NOT NULL,
+    id bigint NOT NULL,
     recorded_at timestamp with time zone NOT NULL,
-    actor_id integer,
+    actor_id bigint,
     actor_name text,
     actor_role text,
     action text NOT NULL,
     subject_kind text NOT NULL,
-    subject_id integer,
+    subject_id bigint,
     subject_code text,
     before jsonb,
     after jsonb,
@@ -851,9 +832,7 @@ CREATE TABLE public.document (
     occurred_at timestamp with time zone NOT NULL,
     recorded_by bigint,
     note text,
-    reverses_document_id bigint,
-    CONSTRAINT document_kind_check CHECK ((kind = ANY (ARRAY['opening'::text, 'receipt'::text, 'transfer'::text, 'adjustment'::text, 'lot_status'::text, 'issue'::text, 'issue_return'::text, 'completion'::text, 'scrap'::text, 'packing'::text, 'shipment'::text, 'invoice'::text, 'credit_note'::text, 'payment'::text, 'refund'::text, 'cancellation'::text, 'manual_entry'::text, 'reversal'::text]))),
-    CONSTRAINT document_reversal_names_one CHECK (((kind = 'reversal'::text) = (reverses_document_id IS NOT NULL)))
+    CONSTRAINT document_kind_check CHECK ((kind = ANY (ARRAY['opening'::text, 'receipt'::text, 'transfer'::text, 'adjustment'::text, 'lot_status'::text, 'issue'::text, 'issue_return'::text, 'completion'::text, 'scrap'::text, 'packing'::text, 'shipment'::text, 'invoice'::text, 'credit_note'::text, 'payment'::text, 'refund'::text, 'cancellation'::text, 'manual_entry'::text])))
 );
 
 COMMENT ON TABLE public.document IS 'Something that happened, with its number, instant and person; moves and entries hang from it. No person: the system, on a payment event.';
@@ -868,7 +847,7 @@ ALTER TABLE public.document ALTER COLUMN id ADD GENERATED ALWAYS AS IDENTITY (
 );
 
 CREATE TABLE public.file_chunk (
-    file_id integer NOT NULL,
+    file_id bigint NOT NULL,
     "position" integer NOT NULL,
     bytes bytea NOT NULL,
     CONSTRAINT file_chunk_bytes_check CHECK (((length(bytes) >= 1) AND (length(bytes) <= 262144))),
@@ -879,7 +858,7 @@ ALTER TABLE ONLY public.file_chunk ALTER COLUMN bytes SET STORAGE EXTERNAL;
 COMMENT ON TABLE public.file_chunk IS 'A piece of a file''s content, in order from position 0, so that it can be streamed. Append-only.';
 
 CREATE TABLE public.file_object (
-    id integer NOT NULL,
+    id bigint NOT NULL,
     sha256 bytea NOT NULL,
     byte_size integer NOT NULL,
     media_type text NOT NULL,
@@ -923,13 +902,11 @@ CREATE TABLE public.import_run (
     id bigint NOT NULL,
     kind text NOT NULL,
     file_name text NOT NULL,
-    content_sha256 bytea NOT NULL,
     row_count integer NOT NULL,
     applied_at timestamp with time zone NOT NULL,
     applied_by bigint NOT NULL,
     document_id bigint,
-    CONSTRAINT import_run_content_sha256_check CHECK ((length(content_sha256) = 32)),
-    CONSTRAINT import_run_kind_check CHECK ((kind = ANY (ARRAY['parts'::text, 'bill'::text, 'build_steps'::text, 'test_plan'::text, 'opening_stock'::text]))),
+    CONSTRAINT import_run_kind_check CHECK ((kind = ANY (ARRAY['parts'::text, 'bill'::text, 'opening_stock'::text]))),
     CONSTRAINT import_run_row_count_check CHECK ((row_count >= 0))
 );
 
@@ -1317,12 +1294,13 @@ ALTER TABLE public.order_line_need ALTER COLUMN id ADD GENERATED ALWAYS AS IDENT
 );
 
 CREATE TABLE public.outbox_mail (
-    id integer NOT NULL,
+    id bigint NOT NULL,
     dedupe_key text NOT NULL,
     recipient text NOT NULL,
     subject text NOT NULL,
     body_text text NOT NULL,
     body_html text NOT NULL,
+    confidential boolean DEFAULT false NOT NULL,
     message_id text NOT NULL,
     created_at timestamp with time zone NOT NULL,
     attempts integer DEFAULT 0 NOT NULL,
@@ -1341,12 +1319,14 @@ COMMENT ON TABLE public.outbox_mail IS 'A mail that is to leave once; written in
 
 COMMENT ON COLUMN public.outbox_mail.dedupe_key IS 'Names the event, so that one event sends one mail.';
 
+COMMENT ON COLUMN public.outbox_mail.confidential IS 'Its text holds a link that lets somebody in, and is emptied once it has left.';
+
 COMMENT ON COLUMN public.outbox_mail.claimed_at IS 'Set while a sender has it in hand. One left behind by a broken sender may have left: it waits for a person.';
 
 CREATE TABLE public.outbox_mail_attachment (
-    mail_id integer NOT NULL,
+    mail_id bigint NOT NULL,
     "position" integer NOT NULL,
-    file_id integer NOT NULL,
+    file_id bigint NOT NULL,
     file_name text NOT NULL,
     CONSTRAINT outbox_mail_attachment_file_name_check CHECK ((file_name !~ '[\r\n/\\]'::text)),
     CONSTRAINT outbox_mail_attachment_position_check CHECK (("position" >= 0))
@@ -1976,7 +1956,7 @@ CREATE TABLE public.unit_step (
 COMMENT ON TABLE public.unit_step IS 'A build step done on a unit, by whom and when.';
 
 CREATE TABLE public.user_known_address (
-    user_id integer NOT NULL,
+    user_id bigint NOT NULL,
     address_digest bytea NOT NULL,
     last_signed_in_at timestamp with time zone NOT NULL,
     CONSTRAINT user_known_address_address_digest_check CHECK ((length(address_digest) = 32))
@@ -1988,14 +1968,14 @@ CREATE TABLE public.user_session (
     sid text NOT NULL,
     sess jsonb NOT NULL,
     expire timestamp with time zone NOT NULL,
-    user_id integer GENERATED ALWAYS AS (((sess #>> '{passport,user}'::text[]))::integer) STORED
+    user_id bigint GENERATED ALWAYS AS (((sess #>> '{passport,user}'::text[]))::bigint) STORED
 );
 
 COMMENT ON TABLE public.user_session IS 'A browser''s session, written by connect-pg-simple; without a user until somebody signs in.';
 
 CREATE TABLE public.user_token (
-    id integer NOT NULL,
-    user_id integer NOT NULL,
+    id bigint NOT NULL,
+    user_id bigint NOT NULL,
     purpose text NOT NULL,
     token_hash bytea NOT NULL,
     new_email text,
@@ -2164,9 +2144,6 @@ ALTER TABLE ONLY public.document
 
 ALTER TABLE ONLY public.document
     ADD CONSTRAINT document_pkey PRIMARY KEY (id);
-
-ALTER TABLE ONLY public.document
-    ADD CONSTRAINT document_reversed_once UNIQUE (reverses_document_id);
 
 ALTER TABLE ONLY public.file_chunk
     ADD CONSTRAINT file_chunk_pkey PRIMARY KEY (file_id, "position");
@@ -2490,8 +2467,6 @@ CREATE INDEX document_by_kind ON public.document USING btree (kind, occurred_at 
 
 CREATE INDEX idempotency_key_claimed_at ON public.idempotency_key USING btree (claimed_at);
 
-CREATE INDEX import_run_by_content ON public.import_run USING btree (content_sha256);
-
 CREATE INDEX invoice_by_customer ON public.invoice USING btree (customer_id) WHERE (customer_id IS NOT NULL);
 
 CREATE INDEX invoice_by_day ON public.invoice USING btree (issued_on DESC, id DESC);
@@ -2594,7 +2569,7 @@ CREATE INDEX stock_balance_by_bin ON public.stock_balance USING btree (bin_id) W
 
 CREATE INDEX stock_balance_by_part ON public.stock_balance USING btree (part_id) WHERE (quantity > (0)::numeric);
 
-CREATE INDEX stock_move_by_document ON public.stock_move USING btree (document_id, id);
+CREATE INDEX stock_move_by_document ON public.stock_move USING btree (document_id);
 
 CREATE INDEX stock_move_by_instant ON public.stock_move USING btree (occurred_at, id);
 
@@ -2641,8 +2616,6 @@ CREATE CONSTRAINT TRIGGER journal_line_balances AFTER INSERT ON public.journal_l
 CREATE CONSTRAINT TRIGGER journal_line_stock_agrees AFTER INSERT ON public.journal_line DEFERRABLE INITIALLY DEFERRED FOR EACH ROW EXECUTE FUNCTION public.document_stock_agrees();
 
 CREATE TRIGGER packed_item_sound BEFORE INSERT ON public.packed_item FOR EACH ROW EXECUTE FUNCTION public.packed_unit_is_sound();
-
-CREATE TRIGGER part_stays_as_moved BEFORE UPDATE OF measure, traced ON public.part FOR EACH ROW WHEN (((old.measure <> new.measure) OR (old.traced <> new.traced))) EXECUTE FUNCTION public.part_stays_as_moved();
 
 CREATE TRIGGER refund_checked AFTER INSERT OR UPDATE ON public.refund FOR EACH ROW EXECUTE FUNCTION public.refund_within_payment();
 
@@ -2760,9 +2733,6 @@ ALTER TABLE ONLY public.demand
 
 ALTER TABLE ONLY public.document
     ADD CONSTRAINT document_recorded_by_fkey FOREIGN KEY (recorded_by) REFERENCES public.app_user(id);
-
-ALTER TABLE ONLY public.document
-    ADD CONSTRAINT document_reverses_document_id_fkey FOREIGN KEY (reverses_document_id) REFERENCES public.document(id);
 
 ALTER TABLE ONLY public.file_chunk
     ADD CONSTRAINT file_chunk_file_id_fkey FOREIGN KEY (file_id) REFERENCES public.file_object(id);
@@ -3180,9 +3150,9 @@ GRANT SELECT,INSERT ON TABLE public.document TO emberlot_server;
 
 GRANT SELECT,USAGE ON SEQUENCE public.document_id_seq TO emberlot_server;
 
-GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.file_chunk TO emberlot_server;
+GRANT SELECT,INSERT ON TABLE public.file_chunk TO emberlot_server;
 
-GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.file_object TO emberlot_server;
+GRANT SELECT,INSERT ON TABLE public.file_object TO emberlot_server;
 
 GRANT SELECT,USAGE ON SEQUENCE public.file_object_id_seq TO emberlot_server;
 

@@ -3,14 +3,14 @@
 -- takes now() by default.
 
 create table audit_entry (
-  id integer generated always as identity primary key,
+  id bigint generated always as identity primary key,
   recorded_at timestamptz not null,
-  actor_id integer,
+  actor_id bigint,
   actor_name text,
   actor_role text,
   action text not null check (action ~ '^[a-z][a-z_]*(\.[a-z_]+)*$'),
   subject_kind text not null check (subject_kind ~ '^[a-z][a-z_]*$'),
-  subject_id integer,
+  subject_id bigint,
   subject_code text,
   before jsonb,
   after jsonb,
@@ -23,7 +23,7 @@ create index audit_entry_subject on audit_entry (subject_kind, subject_id);
 create index audit_entry_actor on audit_entry (actor_id);
 
 create table file_object (
-  id integer generated always as identity primary key,
+  id bigint generated always as identity primary key,
   sha256 bytea not null check (length(sha256) = 32),
   byte_size integer not null check (byte_size > 0),
   media_type text not null,
@@ -34,7 +34,7 @@ comment on table file_object is 'The content of one or more files, addressed by 
 comment on column file_object.media_type is 'Found from the content when it was stored, never taken from the sender.';
 
 create table file_chunk (
-  file_id integer not null references file_object (id),
+  file_id bigint not null references file_object (id),
   position integer not null check (position >= 0),
   bytes bytea not null check (length(bytes) between 1 and 262144),
   primary key (file_id, position)
@@ -44,12 +44,13 @@ comment on table file_chunk is 'A piece of a file''s content, in order from posi
 alter table file_chunk alter column bytes set storage external;
 
 create table outbox_mail (
-  id integer generated always as identity primary key,
+  id bigint generated always as identity primary key,
   dedupe_key text not null,
   recipient text not null check (recipient !~ '[\r\n,;]'),
   subject text not null check (subject !~ '[\r\n]'),
   body_text text not null,
   body_html text not null,
+  confidential boolean not null default false,
   message_id text not null,
   created_at timestamptz not null,
   attempts integer not null default 0 check (attempts >= 0),
@@ -64,13 +65,14 @@ create table outbox_mail (
 );
 comment on table outbox_mail is 'A mail that is to leave once; written in the transaction of the event that it tells of.';
 comment on column outbox_mail.dedupe_key is 'Names the event, so that one event sends one mail.';
+comment on column outbox_mail.confidential is 'Its text holds a link that lets somebody in, and is emptied once it has left.';
 comment on column outbox_mail.claimed_at is 'Set while a sender has it in hand. One left behind by a broken sender may have left: it waits for a person.';
 create index outbox_mail_waiting on outbox_mail (next_attempt_at) where sent_at is null and given_up_at is null;
 
 create table outbox_mail_attachment (
-  mail_id integer not null references outbox_mail (id),
+  mail_id bigint not null references outbox_mail (id),
   position integer not null check (position >= 0),
-  file_id integer not null references file_object (id),
+  file_id bigint not null references file_object (id),
   file_name text not null check (file_name !~ '[\r\n/\\]'),
   primary key (mail_id, position)
 );

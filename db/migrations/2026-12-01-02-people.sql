@@ -1,13 +1,13 @@
 -- People who sign in, the links that let them in, and their sessions.
 
 create table app_user (
-  id integer generated always as identity primary key,
+  id bigint generated always as identity primary key,
   email text not null check (length(email) between 3 and 254 and email !~ '[[:space:][:cntrl:]]'),
   name text not null check (length(name) between 1 and 120),
   role text not null check (role in ('owner', 'assembler', 'accountant', 'customer')),
   status text not null check (status in ('invited', 'unconfirmed', 'active', 'disabled')),
   password_hash text,
-  customer_id integer,
+  customer_id bigint,
   email_confirmed_at timestamptz,
   created_at timestamptz not null,
   version integer not null default 1 check (version > 0),
@@ -24,8 +24,8 @@ alter table audit_entry
   add constraint audit_entry_actor_fkey foreign key (actor_id) references app_user (id);
 
 create table user_token (
-  id integer generated always as identity primary key,
-  user_id integer not null references app_user (id),
+  id bigint generated always as identity primary key,
+  user_id bigint not null references app_user (id),
   purpose text not null check (purpose in ('sign_up', 'invitation', 'password_reset', 'email_change')),
   token_hash bytea not null check (length(token_hash) = 32),
   new_email text,
@@ -41,7 +41,7 @@ comment on table user_token is 'A link sent by mail that can be used once for on
 create index user_token_open on user_token (user_id, purpose) where used_at is null and voided_at is null;
 
 create table user_known_address (
-  user_id integer not null references app_user (id),
+  user_id bigint not null references app_user (id),
   address_digest bytea not null check (length(address_digest) = 32),
   last_signed_in_at timestamptz not null,
   primary key (user_id, address_digest)
@@ -52,7 +52,7 @@ create table user_session (
   sid text primary key,
   sess jsonb not null,
   expire timestamptz not null,
-  user_id integer generated always as ((sess #>> '{passport,user}')::integer) stored
+  user_id bigint generated always as ((sess #>> '{passport,user}')::bigint) stored
 );
 comment on table user_session is 'A browser''s session, written by connect-pg-simple; without a user until somebody signs in.';
 create index user_session_expire on user_session (expire);

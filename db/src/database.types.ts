@@ -280,7 +280,6 @@ export interface Document {
   number: string;
   occurred_at: Timestamp;
   recorded_by: number | null;
-  reverses_document_id: number | null;
 }
 
 export interface FileChunk {
@@ -316,7 +315,6 @@ export interface IdempotencyKey {
 export interface ImportRun {
   applied_at: Timestamp;
   applied_by: number;
-  content_sha256: Buffer;
   document_id: number | null;
   file_name: string;
   id: Generated<number>;
@@ -528,6 +526,10 @@ export interface OutboxMail {
    * Set while a sender has it in hand. One left behind by a broken sender may have left: it waits for a person.
    */
   claimed_at: Timestamp | null;
+  /**
+   * Its text holds a link that lets somebody in, and is emptied once it has left.
+   */
+  confidential: Generated<boolean>;
   created_at: Timestamp;
   /**
    * Names the event, so that one event sends one mail.

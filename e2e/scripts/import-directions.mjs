@@ -13,11 +13,11 @@ const workspaces = {
 /** Rows of the server from the ground up; a folder imports from its own row and those before it. */
 const serverRows = [
   ['platform'],
-  ['people', 'settings', 'parts', 'suppliers', 'bills'],
+  ['people', 'parts', 'suppliers', 'bills'],
   ['stock', 'journal', 'invoicing'],
-  ['planning', 'purchasing', 'builds', 'units', 'testing', 'imports'],
+  ['planning', 'purchasing', 'builds', 'units', 'testing'],
   ['catalogue', 'orders', 'payments', 'shipping', 'returns', 'recalls'],
-  ['books', 'today', 'find'],
+  ['books'],
   ['demo'],
 ];
 
@@ -31,7 +31,7 @@ const clientLayers = {
 };
 
 /** What `shared` may take from outside: it runs in the browser and on the server alike. */
-const sharedPackages = ['decimal.js', 'jsvat', 'mathjs'];
+const sharedPackages = ['decimal.js'];
 
 const isSpec = (file) => /\.(test|spec)\.tsx?$/.test(file);
 /** Specs and what they are set up with may reach anywhere within their workspace. */

@@ -4,8 +4,7 @@ import { euro } from './currency.js';
 import { lineAmount } from './line-amount.js';
 import { minorAmount } from './minor-units.js';
 import type { VatCategory } from './vat-category.js';
-import { vatOnNet } from './vat-amount.js';
-import { totalsFromGross, totalsFromNet, type VatEntry } from './vat-totals.js';
+import { totalsFromGross, totalsFromNet, vatOnNet, type VatEntry } from './vat-totals.js';
 
 const cents = (text: string) => minorAmountFromMajor(text, euro);
 const entry = (amount: string, ratePercent: string, category: VatCategory = 'S'): VatEntry => ({

@@ -1,4 +1,4 @@
-import { Decimal } from '../measure/decimal.js';
+import { Decimal } from 'decimal.js';
 
 /** What the label of a cell says. */
 export interface CellRating {

@@ -1,3 +1,0 @@
-import type { AreaParts } from '../../lib/area';
-
-export const books: AreaParts = { links: [], routes: [] };

@@ -1,0 +1,3 @@
+export class HealthDto {
+  status: 'ok';
+}

@@ -1,0 +1,26 @@
+import { Injectable } from '@nestjs/common';
+import { type Transaction, sql } from 'kysely';
+import type { DB } from '@emberlot/db/database.types';
+
+/** Numbers of documents: one after the other in a series and period, without a gap. */
+@Injectable()
+export class Numbers {
+  /**
+   * Takes the next number. The series stays locked until the transaction ends, so take it as the last step before the
+   * document is inserted: a rollback gives the number back, and whoever waits gets the one after.
+   *
+   * @param series which documents: `invoice`
+   * @param period the year in which the numbers begin again at 1, or an empty text for a series that never does
+   */
+  async next(trx: Transaction<DB>, series: string, period: string): Promise<number> {
+    const row = await trx
+      .insertInto('number_series')
+      .values({ series, period, last_number: 1 })
+      .onConflict((conflict) =>
+        conflict.columns(['series', 'period']).doUpdateSet({ last_number: sql`number_series.last_number + 1` }),
+      )
+      .returning('last_number')
+      .executeTakeFirstOrThrow();
+    return row.last_number;
+  }
+}
