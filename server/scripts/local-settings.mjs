@@ -46,11 +46,11 @@ export function fakesEnvironment({ ports, secrets, state }) {
   return {
     ...process.env,
     PAYMENTS_FAKE_PORT: String(ports.payments),
-    PAYMENTS_FAKE_WEBHOOK_URL: `http://127.0.0.1:${ports.server}/api/payments/webhook`,
-    PAYMENTS_FAKE_WEBHOOK_SECRET: secrets.webhook,
+    PAYMENTS_WEBHOOK_URL: `http://127.0.0.1:${ports.server}/api/payments/webhook`,
+    PAYMENTS_WEBHOOK_SECRET: secrets.webhook,
     SMTP_PORT: String(ports.smtp),
     MAIL_PAGE_PORT: String(ports.mailPage),
-    ...(state ? { FAKES_STATE_FOLDER: state } : {}),
+    ...(state ? { FAKES_STATE_DIR: state } : {}),
   };
 }
 

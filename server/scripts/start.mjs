@@ -1,7 +1,7 @@
 // Runs the product on this machine: from a fresh clone to a page in the browser, and again in seconds.
 //   npm start -- [--empty] [--port N] [--reset [--yes]]
 // Node alone, since the dependencies may not be there yet.
-import { existsSync } from 'node:fs';
+import { existsSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { createInterface } from 'node:readline/promises';
 import { parseArgs } from 'node:util';
@@ -46,6 +46,12 @@ async function confirmReset() {
   return answer.trim().toLowerCase() === 'yes';
 }
 
+/** The stand-ins' memory goes with the database whose orders and mails it is about. */
+function deleteData(database) {
+  database.reset();
+  rmSync(join(root, '.local/fakes'), { recursive: true, force: true });
+}
+
 async function showAddresses({ env, ports, secrets, empty }) {
   const lines = [
     '',
@@ -68,7 +74,7 @@ async function bringUp(options, guard) {
   const database = await step('Database server', () => openDatabase({ report: remark, guard }));
   remark(database.description);
   await step('Build', () => runNode([join(root, 'server/scripts/build.mjs')]));
-  if (options.reset) await step('Deleting the old data', () => database.reset());
+  if (options.reset) await step('Deleting the old data', () => deleteData(database));
   const ports = await choosePorts(options.port);
   const secrets = localSecrets();
   const env = serverEnvironment({ ports, secrets, databaseUrl: database.serverUrl });
