@@ -57,11 +57,13 @@ export default {
     },
     {
       displayName: 'scripts',
-      rootDir: path('./e2e/scripts'),
+      rootDir: path('.'),
+      roots: ['db', 'server', 'e2e'].map((workspace) => path(`./${workspace}/scripts`)),
       testEnvironment: 'node',
-      testMatch: ['<rootDir>/**/*.test.mjs'],
+      testMatch: ['**/*.test.mjs'],
       transform: {},
     },
   ],
+  testSequencer: path('./e2e/scripts/shuffle-sequencer.mjs'),
   reporters: ['default', path('./e2e/scripts/count-reporter.mjs')],
 };

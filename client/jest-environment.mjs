@@ -1,4 +1,4 @@
-import JsdomEnvironment from 'jest-environment-jsdom';
+import { TestEnvironment } from 'jest-environment-jsdom';
 
 /** jsdom leaves out what the API layer needs; Node has it. */
 const fromNode = [
@@ -14,7 +14,7 @@ const fromNode = [
   'structuredClone',
 ];
 
-export default class BrowserEnvironment extends JsdomEnvironment.TestEnvironment {
+export default class BrowserEnvironment extends TestEnvironment {
   async setup() {
     await super.setup();
     for (const name of fromNode) this.global[name] = globalThis[name];

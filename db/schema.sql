@@ -88,6 +88,14 @@ declare
 begin
   if tg_table_name = 'stock_move' then
     touched := new.document_id;
+    -- A document of many moves is added up once, for its last move of this transaction, whose own check is still to
+    -- come; else opening stock of thousands of lots would be added up thousands of times.
+    if exists (
+      select 1 from stock_move
+      where document_id = touched and id > new.id and xmin = pg_current_xact_id()::xid
+    ) then
+      return null;
+    end if;
   else
     select document_id into touched from journal_entry where id = new.entry_id;
   end if;
@@ -209,6 +217,17 @@ begin
   if new.unit_id is not null and not unit_is_sound(new.unit_id) then
     raise exception 'a unit without a valid pass cannot be packed'
       using errcode = '23514', constraint = 'packed_unit_is_sound';
+  end if;
+  return new;
+end $$;
+
+CREATE FUNCTION public.part_stays_as_moved() RETURNS trigger
+    LANGUAGE plpgsql
+    AS $$
+begin
+  if exists (select 1 from stock_move where part_id = new.id) then
+    raise exception 'part % has moved: its measure and how closely it is followed stay', new.code
+      using errcode = '23514', constraint = 'part_stays_as_moved';
   end if;
   return new;
 end $$;
@@ -832,7 +851,9 @@ CREATE TABLE public.document (
     occurred_at timestamp with time zone NOT NULL,
     recorded_by bigint,
     note text,
-    CONSTRAINT document_kind_check CHECK ((kind = ANY (ARRAY['opening'::text, 'receipt'::text, 'transfer'::text, 'adjustment'::text, 'lot_status'::text, 'issue'::text, 'issue_return'::text, 'completion'::text, 'scrap'::text, 'packing'::text, 'shipment'::text, 'invoice'::text, 'credit_note'::text, 'payment'::text, 'refund'::text, 'cancellation'::text, 'manual_entry'::text])))
+    reverses_document_id bigint,
+    CONSTRAINT document_kind_check CHECK ((kind = ANY (ARRAY['opening'::text, 'receipt'::text, 'transfer'::text, 'adjustment'::text, 'lot_status'::text, 'issue'::text, 'issue_return'::text, 'completion'::text, 'scrap'::text, 'packing'::text, 'shipment'::text, 'invoice'::text, 'credit_note'::text, 'payment'::text, 'refund'::text, 'cancellation'::text, 'manual_entry'::text, 'reversal'::text]))),
+    CONSTRAINT document_reversal_names_one CHECK (((kind = 'reversal'::text) = (reverses_document_id IS NOT NULL)))
 );
 
 COMMENT ON TABLE public.document IS 'Something that happened, with its number, instant and person; moves and entries hang from it. No person: the system, on a payment event.';
@@ -902,11 +923,13 @@ CREATE TABLE public.import_run (
     id bigint NOT NULL,
     kind text NOT NULL,
     file_name text NOT NULL,
+    content_sha256 bytea NOT NULL,
     row_count integer NOT NULL,
     applied_at timestamp with time zone NOT NULL,
     applied_by bigint NOT NULL,
     document_id bigint,
-    CONSTRAINT import_run_kind_check CHECK ((kind = ANY (ARRAY['parts'::text, 'bill'::text, 'opening_stock'::text]))),
+    CONSTRAINT import_run_content_sha256_check CHECK ((length(content_sha256) = 32)),
+    CONSTRAINT import_run_kind_check CHECK ((kind = ANY (ARRAY['parts'::text, 'bill'::text, 'build_steps'::text, 'test_plan'::text, 'opening_stock'::text]))),
     CONSTRAINT import_run_row_count_check CHECK ((row_count >= 0))
 );
 
@@ -2145,6 +2168,9 @@ ALTER TABLE ONLY public.document
 ALTER TABLE ONLY public.document
     ADD CONSTRAINT document_pkey PRIMARY KEY (id);
 
+ALTER TABLE ONLY public.document
+    ADD CONSTRAINT document_reversed_once UNIQUE (reverses_document_id);
+
 ALTER TABLE ONLY public.file_chunk
     ADD CONSTRAINT file_chunk_pkey PRIMARY KEY (file_id, "position");
 
@@ -2467,6 +2493,8 @@ CREATE INDEX document_by_kind ON public.document USING btree (kind, occurred_at 
 
 CREATE INDEX idempotency_key_claimed_at ON public.idempotency_key USING btree (claimed_at);
 
+CREATE INDEX import_run_by_content ON public.import_run USING btree (content_sha256);
+
 CREATE INDEX invoice_by_customer ON public.invoice USING btree (customer_id) WHERE (customer_id IS NOT NULL);
 
 CREATE INDEX invoice_by_day ON public.invoice USING btree (issued_on DESC, id DESC);
@@ -2569,7 +2597,7 @@ CREATE INDEX stock_balance_by_bin ON public.stock_balance USING btree (bin_id) W
 
 CREATE INDEX stock_balance_by_part ON public.stock_balance USING btree (part_id) WHERE (quantity > (0)::numeric);
 
-CREATE INDEX stock_move_by_document ON public.stock_move USING btree (document_id);
+CREATE INDEX stock_move_by_document ON public.stock_move USING btree (document_id, id);
 
 CREATE INDEX stock_move_by_instant ON public.stock_move USING btree (occurred_at, id);
 
@@ -2616,6 +2644,8 @@ CREATE CONSTRAINT TRIGGER journal_line_balances AFTER INSERT ON public.journal_l
 CREATE CONSTRAINT TRIGGER journal_line_stock_agrees AFTER INSERT ON public.journal_line DEFERRABLE INITIALLY DEFERRED FOR EACH ROW EXECUTE FUNCTION public.document_stock_agrees();
 
 CREATE TRIGGER packed_item_sound BEFORE INSERT ON public.packed_item FOR EACH ROW EXECUTE FUNCTION public.packed_unit_is_sound();
+
+CREATE TRIGGER part_stays_as_moved BEFORE UPDATE OF measure, traced ON public.part FOR EACH ROW WHEN (((old.measure <> new.measure) OR (old.traced <> new.traced))) EXECUTE FUNCTION public.part_stays_as_moved();
 
 CREATE TRIGGER refund_checked AFTER INSERT OR UPDATE ON public.refund FOR EACH ROW EXECUTE FUNCTION public.refund_within_payment();
 
@@ -2733,6 +2763,9 @@ ALTER TABLE ONLY public.demand
 
 ALTER TABLE ONLY public.document
     ADD CONSTRAINT document_recorded_by_fkey FOREIGN KEY (recorded_by) REFERENCES public.app_user(id);
+
+ALTER TABLE ONLY public.document
+    ADD CONSTRAINT document_reverses_document_id_fkey FOREIGN KEY (reverses_document_id) REFERENCES public.document(id);
 
 ALTER TABLE ONLY public.file_chunk
     ADD CONSTRAINT file_chunk_file_id_fkey FOREIGN KEY (file_id) REFERENCES public.file_object(id);

@@ -29,6 +29,19 @@ comment on table part is 'Anything that can lie on the shelf: bought part, made 
 comment on column part.traced is 'How closely it is followed: by count, by delivery (lots), or one by one (serial numbers).';
 comment on column part.serial_letters is 'Two or three letters that begin the serial numbers of units made one by one.';
 
+-- Quantities already moved would mean something else under another measure, and a part followed differently has lots of
+-- another kind. The first move holds a lock on the part, so that one of the two waits and then sees the other.
+create function part_stays_as_moved() returns trigger language plpgsql as $$
+begin
+  if exists (select 1 from stock_move where part_id = new.id) then
+    raise exception 'part % has moved: its measure and how closely it is followed stay', new.code
+      using errcode = '23514', constraint = 'part_stays_as_moved';
+  end if;
+  return new;
+end $$;
+create trigger part_stays_as_moved before update of measure, traced on part for each row
+  when (old.measure <> new.measure or old.traced <> new.traced) execute function part_stays_as_moved();
+
 create table part_parameter (
   id bigint generated always as identity primary key,
   part_id bigint not null references part (id) on delete cascade,

@@ -4,13 +4,16 @@ create table document (
   id bigint generated always as identity primary key,
   kind text not null check (kind in (
     'opening', 'receipt', 'transfer', 'adjustment', 'lot_status', 'issue', 'issue_return', 'completion', 'scrap',
-    'packing', 'shipment', 'invoice', 'credit_note', 'payment', 'refund', 'cancellation', 'manual_entry'
+    'packing', 'shipment', 'invoice', 'credit_note', 'payment', 'refund', 'cancellation', 'manual_entry', 'reversal'
   )),
   number text not null,
   occurred_at timestamptz not null,
   recorded_by bigint references app_user (id),
   note text,
-  constraint document_number_unique unique (number)
+  reverses_document_id bigint references document (id),
+  constraint document_number_unique unique (number),
+  constraint document_reversed_once unique (reverses_document_id),
+  constraint document_reversal_names_one check ((kind = 'reversal') = (reverses_document_id is not null))
 );
 create index document_by_kind on document (kind, occurred_at desc);
 comment on table document is 'Something that happened, with its number, instant and person; moves and entries hang from it. No person: the system, on a payment event.';
@@ -162,7 +165,7 @@ create table stock_move (
 );
 create index stock_move_by_lot on stock_move (lot_id, id);
 create index stock_move_by_part on stock_move (part_id, id);
-create index stock_move_by_document on stock_move (document_id);
+create index stock_move_by_document on stock_move (document_id, id);
 create index stock_move_by_instant on stock_move (occurred_at, id);
 comment on table stock_move is 'The stock ledger: one signed change of one lot in one bin, with its value in minor units. Append only.';
 
@@ -236,6 +239,14 @@ declare
 begin
   if tg_table_name = 'stock_move' then
     touched := new.document_id;
+    -- A document of many moves is added up once, for its last move of this transaction, whose own check is still to
+    -- come; else opening stock of thousands of lots would be added up thousands of times.
+    if exists (
+      select 1 from stock_move
+      where document_id = touched and id > new.id and xmin = pg_current_xact_id()::xid
+    ) then
+      return null;
+    end if;
   else
     select document_id into touched from journal_entry where id = new.entry_id;
   end if;
@@ -316,13 +327,15 @@ comment on table reservation is 'A claim of a demand on a quantity of one supply
 
 create table import_run (
   id bigint generated always as identity primary key,
-  kind text not null check (kind in ('parts', 'bill', 'opening_stock')),
+  kind text not null check (kind in ('parts', 'bill', 'build_steps', 'test_plan', 'opening_stock')),
   file_name text not null,
+  content_sha256 bytea not null check (length(content_sha256) = 32),
   row_count integer not null check (row_count >= 0),
   applied_at timestamptz not null,
   applied_by bigint not null references app_user (id),
   document_id bigint references document (id)
 );
+create index import_run_by_content on import_run (content_sha256);
 comment on table import_run is 'A CSV file that was taken in whole.';
 
 insert into account (code, name, kind, is_stock) values

@@ -20,7 +20,7 @@ function signal(pid, name) {
 
 async function endProcess(pid) {
   signal(pid, 'SIGTERM');
-  for (let waited = 0; waited < 5_000 && signal(pid, 0); waited += 50) await sleep(50);
+  for (let waited = 0; waited < 15_000 && signal(pid, 0); waited += 50) await sleep(50);
   signal(pid, 'SIGKILL');
 }
 

@@ -280,6 +280,7 @@ export interface Document {
   number: string;
   occurred_at: Timestamp;
   recorded_by: number | null;
+  reverses_document_id: number | null;
 }
 
 export interface FileChunk {
@@ -315,6 +316,7 @@ export interface IdempotencyKey {
 export interface ImportRun {
   applied_at: Timestamp;
   applied_by: number;
+  content_sha256: Buffer;
   document_id: number | null;
   file_name: string;
   id: Generated<number>;

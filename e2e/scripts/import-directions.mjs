@@ -13,11 +13,11 @@ const workspaces = {
 /** Rows of the server from the ground up; a folder imports from its own row and those before it. */
 const serverRows = [
   ['platform'],
-  ['people', 'parts', 'suppliers', 'bills'],
+  ['people', 'settings', 'parts', 'suppliers', 'bills'],
   ['stock', 'journal', 'invoicing'],
-  ['planning', 'purchasing', 'builds', 'units', 'testing'],
+  ['planning', 'purchasing', 'builds', 'units', 'testing', 'imports'],
   ['catalogue', 'orders', 'payments', 'shipping', 'returns', 'recalls'],
-  ['books'],
+  ['books', 'today', 'find'],
   ['demo'],
 ];
 
@@ -31,7 +31,7 @@ const clientLayers = {
 };
 
 /** What `shared` may take from outside: it runs in the browser and on the server alike. */
-const sharedPackages = ['decimal.js'];
+const sharedPackages = ['decimal.js', 'jsvat', 'mathjs'];
 
 const isSpec = (file) => /\.(test|spec)\.tsx?$/.test(file);
 /** Specs and what they are set up with may reach anywhere within their workspace. */

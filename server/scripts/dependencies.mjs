@@ -4,20 +4,26 @@ import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { root } from './root.mjs';
 
-const read = (file) => JSON.parse(readFileSync(join(root, file), 'utf8')).packages;
+const readPackages = (file) => JSON.parse(readFileSync(join(root, file), 'utf8')).packages;
 
-/** npm notes what it installed in a lock file of its own, written last; packages for other machines are left out. */
-function stale() {
-  const installedFile = 'node_modules/.package-lock.json';
-  if (!existsSync(join(root, installedFile))) return true;
-  const wanted = read('package-lock.json');
-  const installed = read(installedFile);
+/**
+ * Whether something that is wanted is missing or another version; packages for other machines may be missing.
+ * @param {Record<string, { version?: string, integrity?: string, link?: boolean, optional?: boolean }>} wanted
+ *   the packages of package-lock.json
+ * @param {typeof wanted} installed the same, as npm notes them when it has installed everything
+ */
+export function isStale(wanted, installed) {
   return Object.entries(wanted).some(([path, entry]) => {
     if (!path.includes('node_modules/') || entry.link) return false;
     const found = installed[path];
     if (!found) return !entry.optional;
     return found.version !== entry.version || found.integrity !== entry.integrity;
   });
+}
+
+function installedAsLocked() {
+  const noted = 'node_modules/.package-lock.json';
+  return existsSync(join(root, noted)) && !isStale(readPackages('package-lock.json'), readPackages(noted));
 }
 
 function run(command, args) {
@@ -35,7 +41,7 @@ function run(command, args) {
  * @returns {Promise<string>} the outcome in words
  */
 export async function ensureDependencies(report) {
-  if (!stale()) return 'up to date';
+  if (installedAsLocked()) return 'up to date';
   report('installing the dependencies (about a minute)');
   await run('npm', ['ci', '--no-audit', '--no-fund', '--no-progress', '--prefer-offline']);
   return 'installed';

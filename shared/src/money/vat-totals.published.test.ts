@@ -4,7 +4,8 @@ import { euro } from './currency.js';
 import { lineAmount } from './line-amount.js';
 import { minorAmount } from './minor-units.js';
 import type { VatCategory } from './vat-category.js';
-import { totalsFromGross, totalsFromNet, vatOnNet, type VatEntry } from './vat-totals.js';
+import { vatOnNet } from './vat-amount.js';
+import { totalsFromGross, totalsFromNet, type VatEntry } from './vat-totals.js';
 
 const cents = (text: string) => minorAmountFromMajor(text, euro);
 const entry = (amount: string, ratePercent: string, category: VatCategory = 'S'): VatEntry => ({

@@ -2,7 +2,7 @@ import { ArithmeticError } from '../errors/arithmetic-error.js';
 import { decimalText, onCommonScale, type DecimalInput } from '../measure/decimal.js';
 import { roundToTotal } from './apportion.js';
 import { addMinor, minorAmountOf, subtractMinor, sumMinor, zeroAmount, type MinorAmount } from './minor-units.js';
-import { roundQuotient } from './round.js';
+import { netWithinGross, vatOnNet } from './vat-amount.js';
 import { vatRate, type VatCategory } from './vat-category.js';
 
 /** An amount of a document with the VAT it falls under: a line, an allowance or a charge. */
@@ -134,19 +134,6 @@ export function totalsFromGross(
   };
 }
 
-/**
- * VAT on a net amount.
- *
- * @param net minor units
- * @param ratePercent percent
- * @returns minor units, rounded half away from zero (BR-CO-17)
- * @throws ArithmeticError `measure_not_a_number`, `measure_not_exact`, `money_too_large`
- */
-export function vatOnNet(net: MinorAmount, ratePercent: DecimalInput): MinorAmount {
-  const { integers } = onCommonScale([ratePercent, 100]);
-  return minorAmountOf(roundQuotient(BigInt(net) * (integers[0] ?? 0n), integers[1] ?? 1n, 'half-up'));
-}
-
 interface SignedEntry extends VatEntry {
   readonly role: 'line' | 'allowance' | 'charge';
 }
@@ -195,14 +182,13 @@ interface SettledGroup {
 function settleGross(group: EntryGroup, settlement: GrossSettlement): SettledGroup {
   const gross = sumMinor(group.entries.map((entry) => entry.amount));
   const [hundred = 100n, rate = 0n] = onCommonScale([100, group.key.ratePercent]).integers;
-  const rounded = roundQuotient(BigInt(gross) * hundred, hundred + rate, 'half-up');
+  const taxable = netWithinGross(gross, group.key.ratePercent);
   const shares = roundToTotal(
     group.entries.map((entry) => BigInt(entry.amount) * hundred),
     hundred + rate,
-    rounded,
+    BigInt(taxable),
   );
   const nets = group.entries.map((entry, index) => [entry, minorAmountOf(shares[index] ?? 0n)] as const);
-  const taxable = minorAmountOf(rounded);
   const within = subtractMinor(gross, taxable);
   const vat = settlement === 'vat-within-gross' ? within : vatOnNet(taxable, group.key.ratePercent);
   return { breakdown: { ...group.key, taxable, vat }, rounding: subtractMinor(within, vat), nets };

@@ -1,4 +1,4 @@
-import { Decimal } from 'decimal.js';
+import { Decimal } from '../measure/decimal.js';
 
 /** What the label of a cell says. */
 export interface CellRating {

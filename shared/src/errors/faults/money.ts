@@ -17,4 +17,7 @@ export const moneyFaults = {
   money_vat_rate_negative: 'A VAT rate of {rate} percent does not exist.',
   money_vat_rate_for_category: 'VAT category {category} does not go with a rate of {rate} percent.',
   money_vat_outside_scope_mixed: 'Lines outside the scope of VAT cannot stand on one document with other lines.',
+  money_no_rate: 'There is no exchange rate from {from} to {to} for {day}.',
+  money_rate_too_old: 'The latest exchange rate from {from} to {to} for {day} is of {rateDay}, which is too old.',
+  money_rate_not_positive: 'An exchange rate of {rate} does not exist.',
 } as const;

@@ -1,0 +1,62 @@
+import { createBrowserRouter, redirect, type RouteObject } from 'react-router-dom';
+import { accountRoutes } from '../features/account/routes';
+import { shopRoutes } from '../features/shop/routes';
+import { onlyFor, onlyForStaff } from './access';
+import { areas } from './areas';
+import { NotFound, RouteFault } from './faults';
+import { PageLoading, Root } from './root';
+
+const staff: RouteObject = {
+  id: 'staff',
+  loader: onlyForStaff,
+  lazy: () => import('./shell/staff-shell'),
+  children: [
+    {
+      // A fault inside a page leaves the shell standing.
+      ErrorBoundary: RouteFault,
+      children: areas
+        .filter(({ routes }) => routes.length > 0)
+        .map(({ path, roles, routes }) => ({
+          path,
+          loader: onlyFor(roles),
+          ErrorBoundary: RouteFault,
+          children: [...routes, notFound()],
+        })),
+    },
+  ],
+};
+
+const fullScreen: RouteObject = {
+  lazy: () => import('./shell/bench-shell'),
+  ErrorBoundary: RouteFault,
+  children: areas
+    .filter(({ fullScreenRoutes }) => fullScreenRoutes)
+    .map(({ path, roles, fullScreenRoutes = [] }) => ({
+      path,
+      loader: onlyFor(roles),
+      children: [...fullScreenRoutes],
+    })),
+};
+
+const shop: RouteObject = {
+  lazy: () => import('./shell/shop-shell'),
+  children: [{ ErrorBoundary: RouteFault, children: [...shopRoutes, ...accountRoutes, notFound()] }],
+};
+
+function notFound(): RouteObject {
+  return {
+    path: '*',
+    Component: NotFound,
+  };
+}
+
+export const routes: RouteObject[] = [
+  {
+    Component: Root,
+    ErrorBoundary: RouteFault,
+    HydrateFallback: PageLoading,
+    children: [staff, fullScreen, { path: '/staff', loader: () => redirect('/today') }, shop],
+  },
+];
+
+export const router = createBrowserRouter(routes);

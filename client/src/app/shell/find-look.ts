@@ -1,0 +1,68 @@
+import { styled } from '@mui/material/styles';
+
+export const Field = styled('search')(({ theme }) => ({
+  position: 'relative',
+  display: 'flex',
+  flex: '0 1 320px',
+  minWidth: 150,
+  marginLeft: 'auto',
+  '& input': {
+    width: '100%',
+    height: 36,
+    padding: '0 36px 0 10px',
+    border: `1px solid ${theme.vars.palette.tone.edge}`,
+    borderRadius: 3,
+    background: theme.vars.palette.tone.canvas,
+    color: theme.vars.palette.tone.ink,
+    font: 'inherit',
+    textOverflow: 'ellipsis',
+  },
+  '& input::placeholder': { color: theme.vars.palette.tone.inkSoft, opacity: 1 },
+  '& input::-webkit-search-cancel-button': { display: 'none' },
+  '& > kbd': {
+    position: 'absolute',
+    right: 9,
+    top: 7,
+    padding: '0 6px',
+    border: `1px solid ${theme.vars.palette.tone.line}`,
+    borderRadius: 3,
+    background: theme.vars.palette.tone.sheet,
+    color: theme.vars.palette.tone.inkSoft,
+    fontFamily: theme.typography.mono.fontFamily,
+    fontSize: '0.8125rem',
+    lineHeight: '20px',
+  },
+  [theme.breakpoints.down('sm')]: {
+    order: 1,
+    flexBasis: '100%',
+    '& input': { height: 44 },
+    '& > kbd': { display: 'none' },
+  },
+}));
+
+export const Choices = styled('div')(({ theme }) => ({
+  position: 'absolute',
+  zIndex: theme.zIndex.modal,
+  top: 'calc(100% + 4px)',
+  right: 0,
+  width: 'max(100%, min(460px, calc(100vw - 32px)))',
+  border: `1px solid ${theme.vars.palette.tone.edge}`,
+  borderRadius: 3,
+  background: theme.vars.palette.tone.sheet,
+  '& p': { margin: 0, padding: '8px 12px', color: theme.vars.palette.tone.inkSoft, fontSize: '0.8125rem' },
+  '& [role="option"]': {
+    display: 'flex',
+    alignItems: 'center',
+    gap: 12,
+    padding: '7px 12px',
+    minHeight: 44,
+    cursor: 'pointer',
+  },
+  '& [role="option"][aria-selected="true"]': { background: theme.vars.palette.tone.boardSoft },
+  '& [role="option"] > span:last-of-type': {
+    color: theme.vars.palette.tone.inkSoft,
+    overflow: 'hidden',
+    textOverflow: 'ellipsis',
+    whiteSpace: 'nowrap',
+  },
+}));

@@ -1,0 +1,3 @@
+import type { AreaParts } from '../../lib/area';
+
+export const books: AreaParts = { links: [], routes: [] };

@@ -1,0 +1,3 @@
+import type { AreaParts } from '../../lib/area';
+
+export const counter: AreaParts = { links: [], routes: [] };

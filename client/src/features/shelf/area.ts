@@ -1,0 +1,3 @@
+import type { AreaParts } from '../../lib/area';
+
+export const shelf: AreaParts = { links: [], routes: [] };

@@ -1,0 +1,47 @@
+import type { DemoBin, DemoSupplier } from './scenario.types.js';
+
+/** Twenty invented suppliers. */
+export const demoSuppliers: readonly DemoSupplier[] = [
+  { code: 'ALDERCELL', name: 'Aldercell Trading', country: 'DE', leadTimeDays: 21 },
+  { code: 'BRACKWIRE', name: 'Brackwire Metals', country: 'IE', leadTimeDays: 6 },
+  { code: 'CORRIEFER', name: 'Corrie Ferrites', country: 'PT', leadTimeDays: 18 },
+  { code: 'DUNMOREPCB', name: 'Dunmore Boards', country: 'CZ', leadTimeDays: 15 },
+  { code: 'EASTQUAY', name: 'East Quay Components', country: 'IE', leadTimeDays: 4 },
+  { code: 'FELLMOULD', name: 'Fellside Mouldings', country: 'PL', leadTimeDays: 28 },
+  { code: 'GRANTFIX', name: 'Grantfield Fasteners', country: 'IE', leadTimeDays: 5 },
+  { code: 'HOLMTAPE', name: 'Holm Tapes and Sleeves', country: 'NL', leadTimeDays: 8 },
+  { code: 'INVERBOX', name: 'Inver Packaging', country: 'IE', leadTimeDays: 7 },
+  { code: 'JUNIPRINT', name: 'Juniper Print', country: 'IE', leadTimeDays: 6 },
+  { code: 'KELDSEMI', name: 'Keld Semiconductors', country: 'AT', leadTimeDays: 12 },
+  { code: 'LARKSINK', name: 'Lark Heat Sinks', country: 'SK', leadTimeDays: 16 },
+  { code: 'MOSSCHEM', name: 'Moss Chemicals', country: 'BE', leadTimeDays: 9 },
+  { code: 'NORTHRES', name: 'Northgate Passives', country: 'SE', leadTimeDays: 10 },
+  { code: 'OAKCONN', name: 'Oakbridge Connectors', country: 'FR', leadTimeDays: 11 },
+  { code: 'PINETURN', name: 'Pinewood Turned Parts', country: 'IT', leadTimeDays: 20 },
+  { code: 'QUILLSW', name: 'Quill Switches', country: 'DK', leadTimeDays: 13 },
+  { code: 'ROWANPACK', name: 'Rowan Battery Supplies', country: 'FI', leadTimeDays: 17 },
+  { code: 'SLATECOPPER', name: 'Slate Copper Works', country: 'ES', leadTimeDays: 19 },
+  { code: 'TARNLEAD', name: 'Tarn Leads', country: 'EE', leadTimeDays: 14 },
+];
+
+export const demoBins: readonly DemoBin[] = [
+  { code: 'A1', name: 'Cells, fire cabinet' },
+  { code: 'A2', name: 'Battery supplies' },
+  { code: 'B1', name: 'Bare boards' },
+  { code: 'B2', name: 'Resistors' },
+  { code: 'B3', name: 'Capacitors and coils' },
+  { code: 'B4', name: 'Semiconductors' },
+  { code: 'B5', name: 'Connectors and switches' },
+  { code: 'C1', name: 'Ferrites and bobbins' },
+  { code: 'C2', name: 'Wire and copper' },
+  { code: 'C3', name: 'Tapes and sleeves' },
+  { code: 'D1', name: 'Shells and mouldings' },
+  { code: 'D2', name: 'Sinks and clamps' },
+  { code: 'D3', name: 'Fasteners' },
+  { code: 'E1', name: 'Solder and chemicals' },
+  { code: 'F1', name: 'Boxes and foam' },
+  { code: 'F2', name: 'Paper and labels' },
+  { code: 'G1', name: 'Made parts' },
+  { code: 'G2', name: 'Finished tools' },
+  { code: 'Q1', name: 'Quarantine, outside wall', quarantine: true },
+];
