@@ -1,7 +1,7 @@
 import { createBrowserRouter, redirect, type RouteObject } from 'react-router-dom';
-import { accountRoutes } from '../features/account/routes';
+import { accountRoutes, ownAccountRoutes } from '../features/account/routes';
 import { shopRoutes } from '../features/shop/routes';
-import { onlyFor, onlyForStaff } from './access';
+import { onlyFor, onlyForSignedIn, onlyForStaff } from './access';
 import { areas } from './areas';
 import { NotFound, RouteFault } from './faults';
 import { PageLoading, Root } from './root';
@@ -43,6 +43,12 @@ const shop: RouteObject = {
   children: [{ ErrorBoundary: RouteFault, children: [...shopRoutes, ...accountRoutes, notFound()] }],
 };
 
+const own: RouteObject = {
+  loader: onlyForSignedIn,
+  lazy: () => import('./shell/own-shell'),
+  children: [{ ErrorBoundary: RouteFault, children: [...ownAccountRoutes] }],
+};
+
 function notFound(): RouteObject {
   return {
     path: '*',
@@ -55,7 +61,7 @@ export const routes: RouteObject[] = [
     Component: Root,
     ErrorBoundary: RouteFault,
     HydrateFallback: PageLoading,
-    children: [staff, fullScreen, { path: '/staff', loader: () => redirect('/today') }, shop],
+    children: [staff, fullScreen, own, { path: '/staff', loader: () => redirect('/today') }, shop],
   },
 ];
 

@@ -28,6 +28,8 @@ interface FormProps<Values extends FieldValues> {
   children: ReactNode;
   /** Names the form where the page has several. */
   label?: string;
+  /** What stands in the fields once the server has taken it. */
+  after?: 'kept' | 'empty';
 }
 
 /** Every form: errors in a summary and beside their fields, nothing lost when it is refused, the act always below left. */
@@ -38,6 +40,7 @@ export function Form<Values extends FieldValues>({
   onCancel,
   children,
   label,
+  after = 'kept',
 }: FormProps<Values>): ReactElement {
   const names = useState(() => new Set<string>())[0];
   const [refusal, setRefusal] = useState<readonly string[]>([]);
@@ -48,7 +51,7 @@ export function Form<Values extends FieldValues>({
     try {
       await onSubmit(values);
       form.discardDraft();
-      form.reset(values);
+      form.reset(after === 'empty' ? undefined : values);
     } catch (error) {
       setRefusal(refusalOf(error));
     }

@@ -52,6 +52,7 @@ export function ColumnChoiceButton({ choice }: { choice: ColumnChoice }): ReactE
         onClick={(event) => setAnchor(event.currentTarget)}
         aria-haspopup="dialog"
         aria-expanded={anchor !== null}
+        sx={{ px: 0.5 }}
       >
         Columns
       </Button>

@@ -17,7 +17,18 @@ export function column<Row extends GridValidRowModel>(
   draw: (row: Row) => ReactNode,
   more: More<Row> = {},
 ): GridColDef<Row> {
-  return { field, headerName: title, flex: 1, minWidth: 120, ...more, renderCell: ({ row }) => draw(row) };
+  return { field, headerName: title, flex: 1, minWidth: 120, ...more, renderCell: ({ row }) => whole(draw(row)) };
+}
+
+/** Text that does not fit ends in dots and is whole on hover. */
+function whole(drawn: ReactNode): ReactNode {
+  return typeof drawn === 'string' ? (
+    <span className="text" title={drawn}>
+      {drawn}
+    </span>
+  ) : (
+    drawn
+  );
 }
 
 /** The thing itself, as its tag; never hidden, since it is the way to the thing. */

@@ -34,6 +34,20 @@ const Search = styled('input')(({ theme }) => ({
   '&::placeholder': { color: theme.vars.palette.tone.inkSoft, opacity: 1 },
 }));
 
+const DayChip = styled('label')(({ theme }) => ({
+  display: 'inline-flex',
+  alignItems: 'center',
+  gap: 8,
+  border: `1px solid ${theme.vars.palette.tone.edge}`,
+  borderRadius: 3,
+  padding: '0 10px',
+  minHeight: 32,
+  background: theme.vars.palette.tone.sheet,
+  fontSize: '0.8125rem',
+  '&[data-on]': { borderColor: theme.vars.palette.tone.board, background: theme.vars.palette.tone.boardSoft },
+  '& input': { border: 0, background: 'none', color: 'inherit', font: 'inherit', padding: 0 },
+}));
+
 interface FilterChipsProps<Row> {
   grid: ServerGridModel<Row>;
   searchLabel?: string;
@@ -110,6 +124,14 @@ interface FilterChipProps {
 
 function FilterChip({ filter, value, onChange }: FilterChipProps): ReactElement {
   const [anchor, setAnchor] = useState<HTMLElement | null>(null);
+  if (filter.kind === 'day') {
+    return (
+      <DayChip data-on={value ? '' : undefined}>
+        {filter.label}
+        <input type="date" value={value ?? ''} onChange={({ target }) => onChange(target.value || undefined)} />
+      </DayChip>
+    );
+  }
   if (!filter.options) {
     return (
       <Chip

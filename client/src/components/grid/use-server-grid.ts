@@ -13,8 +13,9 @@ export interface GridFilter {
   /** The name the API and the address bar know it by. */
   field: string;
   label: string;
-  /** A choice of values; without them the filter is on or off. */
+  /** A choice of values; without them the filter is on or off, or a day. */
   options?: readonly { value: string; label: string }[];
+  kind?: 'day';
 }
 
 export interface ServerGridSettings<Row, Key extends QueryKey> {

@@ -52,7 +52,7 @@ const Cell = styled('button')(({ theme }) => {
     '&[data-verdict="rework"]': {
       color: tone.tape,
       borderColor: tone.tape,
-      '& i': { background: tone.tapeSoft, borderColor: tone.tape },
+      '& i': { background: tone.tapeSoft, borderTop: 0 },
     },
     '&[data-verdict="scrapped"]': { color: tone.inkSoft, '& i': { background: tone.line, borderColor: tone.inkSoft } },
     '& i[data-level="1"]': { borderTop: 0 },
