@@ -1,6 +1,10 @@
 import { Module } from '@nestjs/common';
+import { InvoicingModule } from './invoicing/invoicing.module.js';
+import { JournalModule } from './journal/journal.module.js';
 import { PeopleModule } from './people/people.module.js';
 import { PlatformModule } from './platform/platform.module.js';
+import { SettingsModule } from './settings/settings.module.js';
+import { StockModule } from './stock/stock.module.js';
 
 /** Everything the server is made of; a new module is added to its row. */
 @Module({
@@ -8,7 +12,11 @@ import { PlatformModule } from './platform/platform.module.js';
     PlatformModule,
     // Master data
     PeopleModule,
+    SettingsModule,
     // The ledgers and documents that others post to
+    StockModule,
+    JournalModule,
+    InvoicingModule,
     // Making
     // Selling and after
     // For the accountant

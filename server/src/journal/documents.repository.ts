@@ -1,0 +1,30 @@
+import { Injectable } from '@nestjs/common';
+import type { DB } from '@emberlot/db/database.types';
+import type { Transaction } from 'kysely';
+import type { DocumentKind } from './document-kinds.js';
+
+export interface DocumentRow {
+  readonly kind: DocumentKind;
+  readonly number: string;
+  readonly occurredAt: Date;
+  readonly recordedBy: number | null;
+  readonly note: string | null;
+}
+
+@Injectable()
+export class DocumentsRepository {
+  async insert(trx: Transaction<DB>, row: DocumentRow): Promise<number> {
+    const { id } = await trx
+      .insertInto('document')
+      .values({
+        kind: row.kind,
+        number: row.number,
+        occurred_at: row.occurredAt,
+        recorded_by: row.recordedBy,
+        note: row.note,
+      })
+      .returning('id')
+      .executeTakeFirstOrThrow();
+    return id;
+  }
+}
