@@ -137,6 +137,16 @@ describe('a payment that is not what was asked for', () => {
   });
 });
 
+describe('the clock', () => {
+  it('can be turned on, so that sessions end and money becomes available', async () => {
+    await paidOrder(fake, client);
+    const { id } = await client.checkout.sessions.create(order());
+    await fake.control('POST', '/control/clock', { offset: 3 * 24 * 3600 });
+    expect((await client.checkout.sessions.retrieve(id)).status).toBe('expired');
+    expect((await client.balance.retrieve()).available).toMatchObject([{ amount: 20_463, currency: 'eur' }]);
+  });
+});
+
 describe('the controls', () => {
   it('list themselves, show what is kept, and forget it', async () => {
     const list = (await fake.control('GET', '/control')) as { call: string; does: string }[];

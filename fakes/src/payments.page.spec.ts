@@ -46,6 +46,11 @@ describe('the payment page', () => {
     expect(response.headers.get('content-security-policy')).toContain("default-src 'none'");
   });
 
+  it('bears the name that the shop gave with the session', async () => {
+    const { id } = await open({ branding_settings: { display_name: 'The Other Bench' } });
+    expect(await (await fetch(`${fake.address}/pay/${id}`)).text()).toContain('to The Other Bench</h1>');
+  });
+
   it('takes a test card and sends the buyer back with the session’s id', async () => {
     const { id } = await open();
     const paid = await submit(`/pay/${id}`, GOOD);

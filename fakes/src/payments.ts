@@ -1,5 +1,5 @@
 import type { IncomingMessage, ServerResponse } from 'node:http';
-import { answerControl } from './http/control.js';
+import { answerControl, callControl } from './http/control.js';
 import { addressOf, answerPage, Refusal } from './http/exchange.js';
 import { listen } from './http/listener.js';
 import { markup, page } from './http/page.js';
@@ -98,15 +98,4 @@ async function showPages(world: World, request: IncomingMessage, response: Serve
     if (!(fault instanceof Refusal)) throw fault;
     answerPage(response, fault.status, page('Refused', '', markup`<h1>Refused</h1><p>${fault.message}</p>`));
   }
-}
-
-async function callControl(address: string, method: string, path: string, body?: object): Promise<unknown> {
-  const response = await fetch(address + path, {
-    method,
-    headers: { 'content-type': 'application/json', connection: 'close' },
-    ...(body === undefined ? {} : { body: JSON.stringify(body) }),
-  });
-  const answer: unknown = await response.json();
-  if (!response.ok) throw new Error(`${method} ${path} answered ${response.status}: ${JSON.stringify(answer)}`);
-  return answer;
 }

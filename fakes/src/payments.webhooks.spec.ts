@@ -63,6 +63,13 @@ describe('webhooks', () => {
     }
   });
 
+  it('can be signed as of an instant too long ago', async () => {
+    await fake.control('POST', '/control/webhooks/conduct', { age: 301 });
+    await paidOrder(fake, client);
+    await fake.webhooksSettled();
+    expect(() => verified(0)).toThrow(/tolerance/);
+  });
+
   it('go to each endpoint for the types it listens to', async () => {
     fake.setWebhooks([{ url: shop.url, secrets: [SECRET], events: ['checkout.session.completed'] }]);
     await paidOrder(fake, client);

@@ -118,3 +118,15 @@ export function requireFound<T>(thing: T | undefined, sentence: string): T {
   if (thing === undefined) throw new Refusal(404, sentence);
   return thing;
 }
+
+/** Calls a control of a stand-in at an address; throws what it refuses. */
+export async function callControl(address: string, method: string, path: string, body?: object): Promise<unknown> {
+  const response = await fetch(address + path, {
+    method,
+    headers: { 'content-type': 'application/json', connection: 'close' },
+    ...(body === undefined ? {} : { body: JSON.stringify(body) }),
+  });
+  const answer: unknown = await response.json();
+  if (!response.ok) throw new Error(`${method} ${path} answered ${response.status}: ${JSON.stringify(answer)}`);
+  return answer;
+}

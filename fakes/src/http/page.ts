@@ -39,7 +39,8 @@ const STYLE = new Markup(`
   h2 { font-size: 18px; margin: 24px 0 8px; }
   table { width: 100%; border-collapse: collapse; }
   th, td { text-align: left; vertical-align: top; padding: 6px 8px 6px 0; border-bottom: 1px solid #767676; }
-  td.number, th.number { text-align: right; padding-right: 0; white-space: nowrap; }
+  caption { text-align: left; }
+  td.number, th.number { text-align: right; padding: 6px 0 6px 8px; white-space: nowrap; }
   label { display: block; margin: 12px 0 4px; font-weight: 600; }
   input { width: 100%; font: inherit; padding: 8px; border: 1px solid #5b5b5b; border-radius: 0; background: #fff; color: inherit; }
   input[aria-invalid="true"] { border: 2px solid #9b1c1c; }
@@ -47,7 +48,7 @@ const STYLE = new Markup(`
   button { font: inherit; margin: 16px 16px 0 0; padding: 10px 16px; min-height: 44px; border: 1px solid #1b1b1b; background: #e7e7e7; color: #1b1b1b; cursor: pointer; }
   a { color: #0a3c8c; }
   a:focus-visible, input:focus-visible, button:focus-visible, iframe:focus-visible { outline: 3px solid #0a3c8c; outline-offset: 2px; }
-  .fault { border: 2px solid #9b1c1c; padding: 8px 12px; color: #7d1414; }
+  .fault { border: 2px solid #9b1c1c; margin: 8px 0; padding: 8px 12px; color: #7d1414; }
   .hint { color: #4a4a4a; font-size: 14px; margin: 4px 0; }
   .scroll { overflow-x: auto; }
   iframe { width: 100%; height: 60vh; border: 1px solid #5b5b5b; background: #fff; }

@@ -32,20 +32,20 @@ export function assemble(
   changed: () => void,
 ): Assembly {
   const now = () => Math.floor((options.now ?? Date.now)() / 1000);
+  const switches = new Switches();
   const endpoints = (options.webhooks ?? []).map(({ url, secret, events = [] }) => ({
     url,
     secrets: [secret],
     events,
   }));
   const webhooks = new Webhooks(state, endpoints, options.retryDelays ?? DEFAULT_RETRY_DELAYS, now, changed);
-  const switches = new Switches();
   const faults = new Faults();
   const notes = new Notes();
   const world: World = {
     state,
     shopName: options.shopName ?? 'Fernhollow Tools',
     publicAddress: () => options.publicAddress ?? address(),
-    now,
+    now: () => now() + switches.offset,
     deliver: (event) => webhooks.deliver(event),
     listeners: (type) => webhooks.listeners(type),
     takeSurprise: () => switches.takeSurprise(),
@@ -82,6 +82,15 @@ class Notes {
 class Switches {
   #surprise: Surprise | undefined;
   #pendingRefunds = 0;
+  #offset = 0;
+
+  get offset(): number {
+    return this.#offset;
+  }
+
+  turnClock(seconds: number): void {
+    this.#offset = seconds;
+  }
 
   surprise(surprise: Surprise): void {
     this.#surprise = surprise;
@@ -104,6 +113,7 @@ class Switches {
   }
 
   reset(): void {
+    this.#offset = 0;
     this.#surprise = undefined;
     this.#pendingRefunds = 0;
   }

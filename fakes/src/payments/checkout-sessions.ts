@@ -41,6 +41,7 @@ export function createSession(world: World, given: Parameters): Stripe.Checkout.
     metadata: given.metadata('metadata'),
     allowedMethods: readMethods(given),
     locale: given.text('locale') ?? null,
+    shopName: readShopName(given.child('branding_settings')) ?? world.shopName,
     submitType: given.text('submit_type', { oneOf: ['auto', 'book', 'donate', 'pay'] }) ?? null,
   };
   const intentData = readIntentData(given.child('payment_intent_data'));
@@ -88,6 +89,13 @@ function readEmail(given: Parameters): string | null {
   if (email === undefined) return null;
   if (!isEmail(email)) throw badParameter('customer_email', `Invalid email address: ${email}`, 'email_invalid');
   return email;
+}
+
+/** The page shows the shop's name and takes no other branding. */
+function readShopName(branding: Parameters | undefined): string | undefined {
+  const name = branding?.text('display_name', { longest: 200 });
+  branding?.refuseUnknown();
+  return name;
 }
 
 /** A bank debit is offered only where it is named. */

@@ -19,21 +19,29 @@ import type { Surprise, World } from './world.js';
 export type MoneySwitches = {
   surprise(surprise: Surprise): void;
   nextRefundsPending(count: number): void;
+  turnClock(seconds: number): void;
 };
 
 /** Controls of what happens to money: sessions, refunds, disputes, payouts. */
 export function moneyControls(world: World, switches: MoneySwitches): readonly ControlRoute[] {
-  const { state } = world;
-  const session = ({ parameters }: ControlCall) =>
-    requireFound(state.sessions.find(parameters[0] ?? ''), 'No such session.');
-  const charge = ({ parameters }: ControlCall) => chargeBehind(world, parameters[0] ?? '');
-  const refund = ({ parameters }: ControlCall) =>
-    requireFound(state.refunds.find(parameters[0] ?? ''), 'No such refund.');
-  const dispute = ({ parameters }: ControlCall) =>
-    requireFound(state.disputes.find(parameters[0] ?? ''), 'No such dispute.');
-  const payout = ({ parameters }: ControlCall) =>
-    requireFound(state.payouts.find(parameters[0] ?? ''), 'No such payout.');
   return [
+    ...sessionControls(world, switches),
+    ...refundControls(world, switches),
+    ...disputeControls(world),
+    ...payoutControls(world),
+  ];
+}
+
+function sessionControls(world: World, switches: MoneySwitches): readonly ControlRoute[] {
+  const session = ({ parameters }: ControlCall) =>
+    requireFound(world.state.sessions.find(parameters[0] ?? ''), 'No such session.');
+  return [
+    {
+      method: 'POST',
+      path: '/control/clock',
+      does: 'Turns the clock of everything but the signatures: offset (seconds from the real instant).',
+      run: ({ body }) => switches.turnClock(wholeNumber(body, 'offset', 0)),
+    },
     {
       method: 'POST',
       path: '/control/next-payment',
@@ -67,6 +75,13 @@ export function moneyControls(world: World, switches: MoneySwitches): readonly C
         return expireSession(world, session(call).id);
       },
     },
+  ];
+}
+
+function refundControls(world: World, switches: MoneySwitches): readonly ControlRoute[] {
+  const refund = ({ parameters }: ControlCall) =>
+    requireFound(world.state.refunds.find(parameters[0] ?? ''), 'No such refund.');
+  return [
     {
       method: 'POST',
       path: '/control/refunds/next-pending',
@@ -91,6 +106,14 @@ export function moneyControls(world: World, switches: MoneySwitches): readonly C
         return failRefund(world, refund(call), optionalText(call.body, 'reason') ?? 'lost_or_stolen_card');
       },
     },
+  ];
+}
+
+function disputeControls(world: World): readonly ControlRoute[] {
+  const charge = ({ parameters }: ControlCall) => chargeBehind(world, parameters[0] ?? '');
+  const dispute = ({ parameters }: ControlCall) =>
+    requireFound(world.state.disputes.find(parameters[0] ?? ''), 'No such dispute.');
+  return [
     {
       method: 'POST',
       path: '/control/charges/:id/dispute',
@@ -116,6 +139,13 @@ export function moneyControls(world: World, switches: MoneySwitches): readonly C
         return closeDispute(world, dispute(call), oneOf(call.body, 'outcome', ['won', 'lost'], 'lost') === 'won');
       },
     },
+  ];
+}
+
+function payoutControls(world: World): readonly ControlRoute[] {
+  const payout = ({ parameters }: ControlCall) =>
+    requireFound(world.state.payouts.find(parameters[0] ?? ''), 'No such payout.');
+  return [
     {
       method: 'POST',
       path: '/control/payouts',

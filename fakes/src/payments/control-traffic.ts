@@ -24,6 +24,21 @@ export type Traffic = {
 /** Controls of the calls that come in, the webhooks that go out, and of the whole. */
 export function trafficControls({ state, faults, webhooks, requests, reset }: Traffic): readonly ControlRoute[] {
   return [
+    ...faultControls(faults),
+    ...webhookControls(state, webhooks),
+    {
+      method: 'GET',
+      path: '/control/requests',
+      does: 'Lists the API requests that came in.',
+      run: () => requests(),
+    },
+    { method: 'GET', path: '/control/state', does: 'Shows everything that is kept.', run: () => state.save() },
+    { method: 'POST', path: '/control/reset', does: 'Forgets everything and behaves well again.', run: () => reset() },
+  ];
+}
+
+function faultControls(faults: Faults): readonly ControlRoute[] {
+  return [
     {
       method: 'POST',
       path: '/control/faults',
@@ -34,16 +49,22 @@ export function trafficControls({ state, faults, webhooks, requests, reset }: Tr
     },
     { method: 'GET', path: '/control/faults', does: 'Lists the faults to come.', run: () => faults.list() },
     { method: 'DELETE', path: '/control/faults', does: 'Forgets the faults to come.', run: () => faults.reset() },
+  ];
+}
+
+function webhookControls(state: PaymentsState, webhooks: Webhooks): readonly ControlRoute[] {
+  return [
     {
       method: 'POST',
       path: '/control/webhooks/conduct',
-      does: 'Sets repeat (times each), drop (the next so many), reorder_within and delay (milliseconds).',
+      does: 'Sets repeat (times each), drop (the next so many), reorder_within and delay (milliseconds), age of the signature (seconds).',
       run: ({ body }) => {
         const { conduct } = webhooks.describe();
         return webhooks.setConduct({
           repeat: wholeNumber(body, 'repeat', conduct.repeat),
           drop: wholeNumber(body, 'drop', conduct.drop),
           reorderWithin: wholeNumber(body, 'reorder_within', conduct.reorderWithin),
+          age: wholeNumber(body, 'age', conduct.age),
           delay: wholeNumber(body, 'delay', conduct.delay),
         });
       },
@@ -76,14 +97,6 @@ export function trafficControls({ state, faults, webhooks, requests, reset }: Tr
       does: 'Shows endpoints, conduct, what waits and every attempt made.',
       run: () => ({ ...webhooks.describe(), attempts: webhooks.attempts() }),
     },
-    {
-      method: 'GET',
-      path: '/control/requests',
-      does: 'Lists the API requests that came in.',
-      run: () => requests(),
-    },
-    { method: 'GET', path: '/control/state', does: 'Shows everything that is kept.', run: () => state.save() },
-    { method: 'POST', path: '/control/reset', does: 'Forgets everything and behaves well again.', run: () => reset() },
   ];
 }
 

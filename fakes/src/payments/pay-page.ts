@@ -9,7 +9,6 @@ export const EMPTY_FORM: CardForm = { number: '', expiry: '', code: '', holder: 
 const BAR = 'This page stands in for a payment service. No money moves. Type test card numbers only.';
 
 export type PayView = {
-  readonly shopName: string;
   readonly session: Stripe.Checkout.Session;
   readonly lines: readonly WireLineItem[];
   readonly form: CardForm;
@@ -19,6 +18,10 @@ export type PayView = {
 
 function total(session: Stripe.Checkout.Session): string {
   return moneyText(session.amount_total ?? 0, session.currency ?? 'eur');
+}
+
+function nameOf(session: Stripe.Checkout.Session): string {
+  return session.branding_settings?.display_name ?? 'the shop';
 }
 
 function lineTable(session: Stripe.Checkout.Session, lines: readonly WireLineItem[]): Markup {
@@ -64,7 +67,8 @@ ${fault && markup`<p class="fault" id="${name}-fault">${fault.sentence}</p>`}</d
 
 /** The page where the card is typed. */
 export function payPage(view: PayView): string {
-  const { session, shopName } = view;
+  const { session } = view;
+  const shopName = nameOf(session);
   const alert =
     view.declined ?? (view.faults.length > 0 ? 'The card was not charged yet. See the fields below.' : null);
   const content = markup`<h1>Pay ${total(session)} to ${shopName}</h1>
@@ -91,9 +95,9 @@ function cancelLink(session: Stripe.Checkout.Session, text: string): Markup | fa
 }
 
 /** The step that some cards ask for. */
-export function confirmPage(shopName: string, session: Stripe.Checkout.Session): string {
+export function confirmPage(session: Stripe.Checkout.Session): string {
   const content = markup`<h1>Confirm the payment</h1>
-<p>The bank of the card asks whether it is you who pays ${total(session)} to ${shopName}.</p>
+<p>The bank of the card asks whether it is you who pays ${total(session)} to ${nameOf(session)}.</p>
 <form method="post" action="/pay/${session.id}/confirm">
 <button name="answer" value="yes">Yes, pay</button>
 <button name="answer" value="no">No, do not pay</button>
@@ -102,7 +106,8 @@ export function confirmPage(shopName: string, session: Stripe.Checkout.Session):
 }
 
 /** A session that can no longer be paid here. */
-export function endedPage(shopName: string, session: Stripe.Checkout.Session): string {
+export function endedPage(session: Stripe.Checkout.Session): string {
+  const shopName = nameOf(session);
   if (session.status === 'expired') {
     const content = markup`<h1>This payment page has expired</h1>
 <p>Nothing was charged. To pay, start again from the order at ${shopName}.</p>

@@ -24,7 +24,7 @@ export async function answerPages(world: World, request: IncomingMessage, respon
     return;
   }
   if (session.status !== 'open') {
-    answerPage(response, session.status === 'expired' ? 410 : 200, endedPage(world.shopName, session));
+    answerPage(response, session.status === 'expired' ? 410 : 200, endedPage(session));
     return;
   }
   if (step === undefined) {
@@ -33,7 +33,7 @@ export async function answerPages(world: World, request: IncomingMessage, respon
     return;
   }
   if (posted) follow(world, session, answerConfirmation(world, session.id, body.get('answer') === 'yes'), response);
-  else answerPage(response, 200, confirmPage(world.shopName, session));
+  else answerPage(response, 200, confirmPage(session));
 }
 
 function show(
@@ -44,7 +44,7 @@ function show(
 ): void {
   const { lines } = world.state.sessionPrivates.get(session.id);
   const status = declined === null && faults.length === 0 ? 200 : 422;
-  answerPage(response, status, payPage({ shopName: world.shopName, session, lines, form, faults, declined }));
+  answerPage(response, status, payPage({ session, lines, form, faults, declined }));
 }
 
 type Shown = {

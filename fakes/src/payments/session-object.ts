@@ -15,6 +15,7 @@ export type SessionSeed = {
   readonly allowedMethods: string[];
   readonly locale: string | null;
   readonly submitType: string | null;
+  readonly shopName: string;
 };
 
 /** A new, open session as the API answers it. */
@@ -24,6 +25,7 @@ export function newSession(seed: SessionSeed): Stripe.Checkout.Session {
     id: seed.id,
     amount_subtotal: seed.amount,
     amount_total: seed.amount,
+    branding_settings: { ...PLAIN_BRANDING, display_name: seed.shopName },
     cancel_url: seed.cancelUrl,
     client_reference_id: seed.clientReferenceId,
     created: seed.created,
@@ -54,6 +56,15 @@ export function customerDetails(email: string, name: string | null): Stripe.Chec
     tax_ids: [],
   };
 }
+
+const PLAIN_BRANDING = {
+  background_color: '#ffffff',
+  border_style: 'rectangular',
+  button_color: '#e7e7e7',
+  font_family: 'default',
+  icon: null,
+  logo: null,
+} satisfies Partial<Stripe.Checkout.Session.BrandingSettings>;
 
 const EMPTY = {
   object: 'checkout.session',

@@ -18,6 +18,8 @@ export type WebhookConduct = {
   readonly drop: number;
   /** Events of this many milliseconds are gathered and sent last one first; 0 sends in order. */
   readonly reorderWithin: number;
+  /** By how many seconds the instant of the signature lies back. */
+  readonly age: number;
   /** How long an event waits before it is sent. */
   readonly delay: number;
 };
@@ -34,7 +36,7 @@ type Delivery = { readonly event: string; readonly url: string; readonly attempt
 
 export type ReleaseOrder = 'as-they-came' | 'last-first' | readonly string[];
 
-const ORDERLY: WebhookConduct = { repeat: 1, drop: 0, reorderWithin: 0, delay: 0 };
+const ORDERLY: WebhookConduct = { repeat: 1, drop: 0, reorderWithin: 0, age: 0, delay: 0 };
 const LIMIT_MILLISECONDS = 10_000;
 const LOG_LENGTH = 2000;
 
@@ -213,7 +215,7 @@ export class Webhooks {
 
   /** The header of the SDK's own scheme: the instant, then a signature for each secret in force. */
   private sign(payload: string, secrets: readonly string[]): string {
-    const timestamp = this.now();
+    const timestamp = this.now() - this.#conduct.age;
     const signatures = secrets.map(
       (secret) => this.#signer.generateTestHeaderString({ payload, secret, timestamp }).split(',')[1] ?? '',
     );
