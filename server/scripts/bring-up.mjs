@@ -1,11 +1,14 @@
 // The programs that npm start and npm run dev both run. Node alone.
 import { spawn } from 'node:child_process';
+import { existsSync } from 'node:fs';
 import { join } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { fakesEnvironment } from './local-settings.mjs';
 import { startProcess, untilAnswers } from './processes.mjs';
 import { remark } from './progress.mjs';
 import { root } from './root.mjs';
+
+const demoLoader = join(root, 'server/dist/demo/load.js');
 
 export const logFile = (name) => join(root, '.local/log', `${name}.log`);
 
@@ -45,12 +48,14 @@ export async function startServer({ env, guard, options = [] }) {
 }
 
 export async function loadDemo(serverUrl, settings) {
+  if (!existsSync(demoLoader)) return remark('this version has no demo yet');
   remark('loading the demo: six months of a small shop');
-  await runNode([join(root, 'server/dist/demo/load.js')], { ...settings, DATABASE_URL: serverUrl });
+  await runNode([demoLoader], { ...settings, DATABASE_URL: serverUrl });
 }
 
 /** One line a person of the demo. */
 export async function demoSignIns() {
+  if (!existsSync(demoLoader)) return [];
   const { demoSignIns: list } = await import(pathToFileURL(join(root, 'server/dist/demo/sign-ins.js')).href);
   return list.map(({ role, email, password }) => `    ${role.padEnd(11)} ${email.padEnd(36)} ${password}`);
 }

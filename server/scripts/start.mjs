@@ -53,15 +53,16 @@ function deleteData(database) {
 }
 
 async function showAddresses({ env, ports, secrets, empty }) {
+  const signIns = empty ? [] : await demoSignIns();
   const lines = [
     '',
     `  Emberlot        ${env.BASE_URL}`,
     `  Caught mail     http://127.0.0.1:${ports.mailPage}`,
     `  Payments (test) http://127.0.0.1:${ports.payments}`,
     '',
-    ...(empty
+    ...(signIns.length === 0
       ? [`  An empty shop. Its owner signs up at ${env.BASE_URL}/set-up with the code ${secrets.setUp}`]
-      : ['  Sign in as', ...(await demoSignIns())]),
+      : ['  Sign in as', ...signIns]),
     '',
     `  Logs are in ${join(root, '.local/log')}. Ctrl-C stops everything.`,
     '',
