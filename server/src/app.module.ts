@@ -1,10 +1,12 @@
 import { Module } from '@nestjs/common';
 import { InvoicingModule } from './invoicing/invoicing.module.js';
 import { JournalModule } from './journal/journal.module.js';
+import { PartsModule } from './parts/parts.module.js';
 import { PeopleModule } from './people/people.module.js';
 import { PlatformModule } from './platform/platform.module.js';
 import { SettingsModule } from './settings/settings.module.js';
 import { StockModule } from './stock/stock.module.js';
+import { SuppliersModule } from './suppliers/suppliers.module.js';
 
 /** Everything the server is made of; a new module is added to its row. */
 @Module({
@@ -13,6 +15,8 @@ import { StockModule } from './stock/stock.module.js';
     // Master data
     PeopleModule,
     SettingsModule,
+    PartsModule,
+    SuppliersModule,
     // The ledgers and documents that others post to
     StockModule,
     JournalModule,

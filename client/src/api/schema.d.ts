@@ -170,6 +170,70 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/parts': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Parts_create'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parts/{code}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put: operations['Parts_edit'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parts/{code}/bring-back': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Parts_bringBack'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parts/{code}/retire': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Parts_retire'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/password-changes': {
     parameters: {
       query?: never;
@@ -387,6 +451,38 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/suppliers': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Suppliers_list'];
+    put?: never;
+    post: operations['Suppliers_create'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/suppliers/{code}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Suppliers_get'];
+    put: operations['Suppliers_edit'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
 }
 export type webhooks = Record<string, never>;
 export interface components {
@@ -514,6 +610,153 @@ export interface components {
     OwnSessionsDto: {
       items: components['schemas']['OwnSessionDto'][];
     };
+    PartBatteryDto: {
+      cellCount?: number | null;
+      /** @enum {string} */
+      chemistry: 'lithium_ion' | 'lithium_metal';
+      /** @enum {string} */
+      kind: 'cell' | 'battery';
+      /**
+       * Format: decimal
+       * @example 12.5
+       */
+      lithiumGrams?: string | null;
+      /**
+       * Format: date
+       * @example 2027-02-28
+       */
+      transportTestPassedOn?: string | null;
+      /** @description The test summary of this very design (UN Manual of Tests and Criteria, 38.3). */
+      transportTestReference?: string | null;
+      /**
+       * Format: decimal
+       * @example 12.5
+       */
+      wattHours?: string | null;
+    };
+    PartDto: {
+      battery?: components['schemas']['PartBatteryDto'] | null;
+      code: string;
+      commodityCode?: string | null;
+      description?: string | null;
+      id: number;
+      /**
+       * @description The stock unit; it stays once something has moved.
+       * @enum {string}
+       */
+      measure: 'piece' | 'set' | 'pair' | 'm' | 'mm' | 'kg' | 'g' | 'l' | 'ml';
+      /** @description Whether measure and the way it is followed stay as they are, because something has moved. */
+      moved: boolean;
+      name: string;
+      originCountryCode?: string | null;
+      parameters: components['schemas']['PartParameterDto'][];
+      /**
+       * Format: decimal
+       * @example 12.5
+       */
+      reorderPoint?: string | null;
+      retiredOn: string | null;
+      /** @description The letters that begin the serial numbers of a part followed one by one. */
+      serialLetters?: string | null;
+      shelfLifeDays?: number | null;
+      suppliers: components['schemas']['PartSupplierDto'][];
+      /**
+       * @description It stays once something has moved.
+       * @enum {string}
+       */
+      traced: 'count' | 'delivery' | 'single';
+      /**
+       * Format: decimal
+       * @example 12.5
+       */
+      unitWeightG?: string | null;
+      version: number;
+    };
+    PartEditDto: {
+      battery?: components['schemas']['PartBatteryDto'] | null;
+      code: string;
+      commodityCode?: string | null;
+      description?: string | null;
+      /**
+       * @description The stock unit; it stays once something has moved.
+       * @enum {string}
+       */
+      measure: 'piece' | 'set' | 'pair' | 'm' | 'mm' | 'kg' | 'g' | 'l' | 'ml';
+      name: string;
+      originCountryCode?: string | null;
+      parameters: components['schemas']['PartParameterDto'][];
+      /**
+       * Format: decimal
+       * @example 12.5
+       */
+      reorderPoint?: string | null;
+      /** @description The letters that begin the serial numbers of a part followed one by one. */
+      serialLetters?: string | null;
+      shelfLifeDays?: number | null;
+      suppliers: components['schemas']['PartSupplierDto'][];
+      /**
+       * @description It stays once something has moved.
+       * @enum {string}
+       */
+      traced: 'count' | 'delivery' | 'single';
+      /**
+       * Format: decimal
+       * @example 12.5
+       */
+      unitWeightG?: string | null;
+      version: number;
+    };
+    PartInputDto: {
+      battery?: components['schemas']['PartBatteryDto'] | null;
+      code: string;
+      commodityCode?: string | null;
+      description?: string | null;
+      /**
+       * @description The stock unit; it stays once something has moved.
+       * @enum {string}
+       */
+      measure: 'piece' | 'set' | 'pair' | 'm' | 'mm' | 'kg' | 'g' | 'l' | 'ml';
+      name: string;
+      originCountryCode?: string | null;
+      parameters: components['schemas']['PartParameterDto'][];
+      /**
+       * Format: decimal
+       * @example 12.5
+       */
+      reorderPoint?: string | null;
+      /** @description The letters that begin the serial numbers of a part followed one by one. */
+      serialLetters?: string | null;
+      shelfLifeDays?: number | null;
+      suppliers: components['schemas']['PartSupplierDto'][];
+      /**
+       * @description It stays once something has moved.
+       * @enum {string}
+       */
+      traced: 'count' | 'delivery' | 'single';
+      /**
+       * Format: decimal
+       * @example 12.5
+       */
+      unitWeightG?: string | null;
+    };
+    PartParameterDto: {
+      name: string;
+      /** @description Of a number: its unit. */
+      unit?: string | null;
+      /** @description A decimal number, or a word. */
+      value: string;
+    };
+    PartRetireDto: {
+      version: number;
+    };
+    PartSupplierDto: {
+      leadTimeDays?: number | null;
+      /** @description The one to order from first; at most one of a part's suppliers. */
+      preferred: boolean;
+      /** @description The supplier's code. */
+      supplier: string;
+      supplierPartCode?: string | null;
+    };
     PasswordChangeDto: {
       /** Format: password */
       currentPassword: string;
@@ -608,6 +851,79 @@ export interface components {
     };
     /** @enum {string} */
     StaffRole: 'owner' | 'assembler' | 'accountant';
+    SuppliedPartDto: {
+      code: string;
+      leadTimeDays: number | null;
+      name: string;
+      preferred: boolean;
+      supplierPartCode: string | null;
+    };
+    SupplierDeliveryDto: {
+      deliveryNote: string | null;
+      lotCount: number;
+      number: string;
+      receivedOn: string;
+    };
+    SupplierDto: {
+      code: string;
+      countryCode?: string | null;
+      /** @description The currency it bills in. */
+      currency: string;
+      /** @description The latest, newest first. */
+      deliveries: components['schemas']['SupplierDeliveryDto'][];
+      /** Format: email */
+      email?: string | null;
+      id: number;
+      /** @description Days from order to delivery, where a part says nothing else. */
+      leadTimeDays?: number | null;
+      name: string;
+      note?: string | null;
+      parts: components['schemas']['SuppliedPartDto'][];
+      phone?: string | null;
+      version: number;
+    };
+    SupplierEditDto: {
+      code: string;
+      countryCode?: string | null;
+      /** @description The currency it bills in. */
+      currency: string;
+      /** Format: email */
+      email?: string | null;
+      /** @description Days from order to delivery, where a part says nothing else. */
+      leadTimeDays?: number | null;
+      name: string;
+      note?: string | null;
+      phone?: string | null;
+      version: number;
+    };
+    SupplierInputDto: {
+      code: string;
+      countryCode?: string | null;
+      /** @description The currency it bills in. */
+      currency: string;
+      /** Format: email */
+      email?: string | null;
+      /** @description Days from order to delivery, where a part says nothing else. */
+      leadTimeDays?: number | null;
+      name: string;
+      note?: string | null;
+      phone?: string | null;
+    };
+    SupplierItemDto: {
+      code: string;
+      countryCode: string | null;
+      id: number;
+      /** @description The day of the latest delivery. */
+      lastReceivedOn: string | null;
+      leadTimeDays: number | null;
+      name: string;
+      /** @description How many parts can be bought there. */
+      partCount: number;
+    };
+    SupplierPageDto: {
+      items: components['schemas']['SupplierItemDto'][];
+      total: number;
+    };
     /** @enum {string} */
     UserStatus: 'invited' | 'unconfirmed' | 'active' | 'disabled';
   };
@@ -931,6 +1247,143 @@ export interface operations {
           [name: string]: unknown;
         };
         content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parts_create: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['PartInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PartDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parts_edit: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['PartEditDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PartDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parts_bringBack: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['PartRetireDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PartDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parts_retire: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['PartRetireDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PartDto'];
+        };
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {
@@ -1438,6 +1891,140 @@ export interface operations {
           [name: string]: unknown;
         };
         content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Suppliers_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SupplierPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Suppliers_create: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SupplierInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SupplierDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Suppliers_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SupplierDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Suppliers_edit: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SupplierEditDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['SupplierDto'];
+        };
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {
