@@ -61,7 +61,7 @@ async function showAddresses({ env, ports, secrets, empty }) {
     `  Payments (test) http://127.0.0.1:${ports.payments}`,
     '',
     ...(signIns.length === 0
-      ? [`  An empty shop. Its owner signs up at ${env.BASE_URL}/set-up with the code ${secrets.setUp}`]
+      ? [`  An empty shop. Its owner signs up at ${env.BASE_URL}/first-owner with the code ${secrets.setUp}`]
       : ['  Sign in as', ...signIns]),
     '',
     `  Logs are in ${join(root, '.local/log')}. Ctrl-C stops everything.`,

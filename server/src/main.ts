@@ -17,6 +17,8 @@ import { PinoLoggerService, appLogger } from './platform/logging/logger.js';
 const lastRequestsMilliseconds = 10_000;
 
 async function start(): Promise<void> {
+  // Before anything is built, so that faults of the settings are all that is shown.
+  Config.read(process.env);
   const app = await NestFactory.create<NestExpressApplication>(AppModule, new ServerAdapter(), {
     abortOnError: false,
     bodyParser: false,
@@ -33,7 +35,8 @@ async function start(): Promise<void> {
   await app.get(JobRunner).start();
   logger.info({ event: 'started', address: await app.getUrl() });
   if (await app.get(FirstOwnerService).isNeeded()) {
-    logger.info({ event: 'first_owner_needed', page: `${config.baseUrl}/set-up`, setupCode: config.setupCode });
+    const code = config.setupCodeIsMadeUp ? { setupCode: config.setupCode } : {};
+    logger.info({ event: 'first_owner_needed', page: `${config.baseUrl}/first-owner`, ...code });
   }
 }
 

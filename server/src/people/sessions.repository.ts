@@ -12,12 +12,11 @@ export interface StoredSession {
 /** People's sessions, beside the session store, which knows them only one at a time. */
 @Injectable()
 export class SessionsRepository {
-  async findByUser(handle: Kysely<DB>, userId: number, now: Date): Promise<readonly StoredSession[]> {
+  async findByUser(handle: Kysely<DB>, userId: number): Promise<readonly StoredSession[]> {
     const rows = await handle
       .selectFrom('user_session')
       .select(['sid', 'sess'])
       .where('user_id', '=', userId)
-      .where('expire', '>=', now)
       .execute();
     return rows.map((row) => ({ sid: row.sid, data: row.sess as unknown as SessionData }));
   }

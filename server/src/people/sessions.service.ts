@@ -33,10 +33,10 @@ export class SessionsService {
 
   async listOwn(user: SignedInUser, currentSessionId: string): Promise<OwnSessionDto[]> {
     const current = sessionDigest(currentSessionId);
-    const now = this.clock.now();
-    const stored = await this.sessions.findByUser(this.database.handle, user.id, now);
+    const now = this.clock.now().getTime();
+    const stored = await this.sessions.findByUser(this.database.handle, user.id);
     return stored
-      .filter((session) => !isSessionOver(session.data, now.getTime()))
+      .filter((session) => !isSessionOver(session.data, now))
       .map((session) => toDto(session, current))
       .toSorted((one, other) => other.lastSeenAt.localeCompare(one.lastSeenAt));
   }

@@ -3,7 +3,7 @@ import { CurrentUser, Roles } from '../platform/auth/access.js';
 import type { SignedInUser } from '../platform/auth/signed-in-user.js';
 import { Creates } from '../platform/idempotency/creates.js';
 import { PageQuery } from '../platform/paging/page-query.dto.js';
-import { IdParam } from '../platform/validation/fields.js';
+import { IdParam } from '../platform/validation/id-param.js';
 import { InvitationDto, StaffEditDto, StaffMemberDto, StaffPageDto } from './people.dto.js';
 import { StaffService } from './staff.service.js';
 

@@ -63,7 +63,7 @@ const offered = [
   imports: [DiscoveryModule],
   controllers: [AuditController, HealthController, OutboxController],
   providers: [
-    { provide: Config, useFactory: () => new Config(process.env) },
+    { provide: Config, useFactory: () => Config.read(process.env) },
     { provide: Clock, useFactory: (config: Config) => new SystemClock(config.shopZone), inject: [Config] },
     { provide: appLogger, useFactory: (config: Config) => createLogger(config.logLevel), inject: [Config] },
     {

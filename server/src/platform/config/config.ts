@@ -22,6 +22,8 @@ const sampleSecrets = ['change-me', 'development', 'sk_test_x', 'whsec_test', 's
  * Nothing else reads `process.env`.
  */
 export class Config {
+  static #ofProcess: Config | undefined;
+
   readonly production: boolean;
   readonly databaseUrl: string;
   readonly host: string;
@@ -36,12 +38,23 @@ export class Config {
   /** Express's `trust proxy`: false, a number of hops, or subnets. Never simply true. */
   readonly trustProxy: false | number | readonly string[];
   readonly shopZone: string;
-  /** Needed to make the first owner, while nobody can sign in yet. */
+  /** Needed to make the first owner, while nobody can sign in yet; made up for this start when none is set. */
   readonly setupCode: string;
+  readonly setupCodeIsMadeUp: boolean;
   readonly fileQuotaBytes: number;
   readonly logLevel: string;
   /** Where the built client lies; without one there, the API is served alone. */
   readonly clientFolder: string;
+
+  /**
+   * The settings of this process; the same object each time, since a set-up code may have been made up for it.
+   *
+   * @throws ConfigFault with one sentence per fault
+   */
+  static read(variables: NodeJS.ProcessEnv): Config {
+    Config.#ofProcess ??= new Config(variables);
+    return Config.#ofProcess;
+  }
 
   /** @throws ConfigFault with one sentence per fault */
   constructor(variables: Readonly<Record<string, string | undefined>>) {
@@ -58,6 +71,7 @@ export class Config {
     this.trustProxy = readTrustProxy(env);
     this.shopZone = env.zone('SHOP_ZONE', 'Europe/Dublin');
     this.setupCode = env.text('SETUP_CODE', randomBytes(9).toString('base64url'));
+    this.setupCodeIsMadeUp = !variables['SETUP_CODE'];
     this.fileQuotaBytes = env.integer('FILE_QUOTA_MB', { fewest: 1, most: 1_000_000, usual: 5_000 }) * 1_000_000;
     this.logLevel = env.oneOf('LOG_LEVEL', ['silent', 'error', 'warn', 'info', 'debug'], 'info');
     this.clientFolder = env.text('CLIENT_FOLDER', builtClient);

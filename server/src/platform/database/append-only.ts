@@ -5,7 +5,30 @@ import type { Database } from './database.js';
  * Tables whose rows are never changed or removed: the server's database role may only read and add.
  * A module that brings such a table adds it here; the grants in `db/grants.sql` must agree, or the server does not start.
  */
-export const appendOnlyTables = ['audit_entry', 'file_object', 'file_chunk'] as const;
+export const appendOnlyTables = [
+  'audit_entry',
+  'batch_cost',
+  'batch_issue',
+  'document',
+  'file_chunk',
+  'file_object',
+  'import_run',
+  'invoice',
+  'invoice_charge',
+  'invoice_line',
+  'invoice_vat',
+  'journal_entry',
+  'journal_line',
+  'lot_status_change',
+  'order_cancellation',
+  'order_invoice',
+  'payment',
+  'payment_event',
+  'reading',
+  'receipt',
+  'rework',
+  'stock_move',
+] as const;
 
 /** The server must not start: what its database role may do is not what the product promises. */
 export class PrivilegeFault extends Error {

@@ -45,6 +45,7 @@ export function securityHeaders(config: Config): RequestHandler[] {
         },
       },
       crossOriginEmbedderPolicy: false,
+      frameguard: { action: 'deny' },
       referrerPolicy: { policy: 'no-referrer' },
       strictTransportSecurity: { maxAge: year, includeSubDomains: true },
     }),

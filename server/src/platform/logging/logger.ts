@@ -12,12 +12,15 @@ export function createLogger(level: string): Logger {
   return pino({ level, timestamp: pino.stdTimeFunctions.isoTime, base: undefined });
 }
 
+/** Nest names each module and route while it puts the application together. */
+const assembling: ReadonlySet<string> = new Set(['InstanceLoader', 'RouterExplorer', 'RoutesResolver']);
+
 /** Nest's messages, in the same lines as everything else. */
 export class PinoLoggerService implements LoggerService {
   constructor(private readonly logger: Logger) {}
 
   log(message: unknown, ...more: unknown[]): void {
-    this.#write('info', message, more);
+    this.#write(assembling.has(String(more.at(-1))) ? 'debug' : 'info', message, more);
   }
 
   error(message: unknown, ...more: unknown[]): void {
@@ -56,8 +59,7 @@ export function requestLog(logger: Logger): RequestHandler {
       return response.statusCode >= 400 ? 'warn' : 'info';
     },
     serializers: {
-      req: (request: { raw: Request; id: unknown }) => ({
-        id: request.id,
+      req: (request: { raw: Request }) => ({
         method: request.raw.method,
         path: request.raw.originalUrl.split('?')[0],
         address: request.raw.ip,

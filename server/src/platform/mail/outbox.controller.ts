@@ -1,7 +1,7 @@
 import { Controller, Get, HttpCode, Post, Query } from '@nestjs/common';
 import { CurrentUser, Roles } from '../auth/access.js';
 import type { SignedInUser } from '../auth/signed-in-user.js';
-import { IdParam } from '../validation/fields.js';
+import { IdParam } from '../validation/id-param.js';
 import { OutboxPageDto, OutboxQuery } from './outbox.dto.js';
 import { OutboxService } from './outbox.service.js';
 

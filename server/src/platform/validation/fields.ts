@@ -1,4 +1,3 @@
-import { Param } from '@nestjs/common';
 import { applyDecorators } from '@nestjs/common';
 import { ApiProperty, type ApiPropertyOptions } from '@nestjs/swagger';
 import { Transform } from 'class-transformer';
@@ -14,7 +13,6 @@ import {
 } from 'class-validator';
 import { dayPattern, largestId, largestMinorAmount, quantityPattern } from '@emberlot/shared/limits/numbers';
 import { textLimit } from '@emberlot/shared/limits/text';
-import { parseId } from './parse-id.js';
 
 /** A field that may be left out; unlike class-validator's own, it refuses an explicit null. */
 export function Optional(): PropertyDecorator {
@@ -116,11 +114,6 @@ export function Code(): PropertyDecorator {
     }),
     describe({ pattern: '^[A-Z0-9][A-Z0-9-]{0,39}$' }),
   );
-}
-
-/** The identifier in a route's path, as a number; anything else is refused before the handler runs. */
-export function IdParam(name = 'id'): ParameterDecorator {
-  return Param(name, { transform: (value: unknown) => parseId(value, name) });
 }
 
 export function cleanText(value: unknown): unknown {
