@@ -27,6 +27,8 @@ export default defineConfig({
     rolldownOptions: {
       output: {
         codeSplitting: {
+          // Else a group would drag along what its modules import, and the first load with it.
+          includeDependenciesRecursively: false,
           groups: [
             // What every first load needs, and what changes only with a dependency.
             {
@@ -39,7 +41,6 @@ export default defineConfig({
               test: /node_modules\/(@emotion|stylis|@mui\/(system|styled-engine|private-theming|utils)|@mui\/material\/(styles|CssBaseline))\//,
               priority: 20,
             },
-            { name: 'grid', test: /node_modules\/@mui\/x-/, priority: 10 },
           ],
         },
       },

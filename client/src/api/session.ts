@@ -1,27 +1,11 @@
 import { queryOptions, useQuery, useQueryClient } from '@tanstack/react-query';
 import { setShopZone } from '../lib/format-time';
-import { request } from './request';
+import { answer, api, type Dto } from './client';
 import { rememberToken } from './send';
 
-export type Role = 'owner' | 'assembler' | 'accountant' | 'customer';
-
-export interface Person {
-  id: number;
-  name: string;
-  email: string;
-  role: Role;
-}
-
-export interface Session {
-  /** Sent back with every change; a new one comes with signing in and out. */
-  csrfToken: string;
-  /** Null for a visitor. */
-  person: Person | null;
-  /** Null until the shop is set up. */
-  shop: { name: string; timeZone: string; currency: string } | null;
-  /** True until the first owner is made. */
-  needsOwner: boolean;
-}
+export type Role = Dto<'Role'>;
+export type Person = Dto<'PersonDto'>;
+export type Session = Dto<'SessionDto'>;
 
 function keepInMind(session: Session): Session {
   rememberToken(session.csrfToken);
@@ -31,8 +15,7 @@ function keepInMind(session: Session): Session {
 
 export const sessionQuery = queryOptions({
   queryKey: ['session'],
-  queryFn: async ({ signal }): Promise<Session> =>
-    keepInMind(await request<Session>('GET', '/api/session', { signal })),
+  queryFn: async ({ signal }): Promise<Session> => keepInMind(await answer(api.GET('/api/session', { signal }))),
   staleTime: 60_000,
 });
 

@@ -1,8 +1,8 @@
-import Button from '@mui/material/Button';
 import type { ReactElement } from 'react';
-import { Link, useRouteError } from 'react-router-dom';
+import { useRouteError } from 'react-router-dom';
 import { sentenceOf } from '../lib/problem';
 import { PageHeading } from '../components/page-heading';
+import { Press } from '../components/press';
 import { NotAllowed } from './access';
 
 const place = { padding: '34px 24px', maxWidth: 1180, margin: '0 auto' };
@@ -13,11 +13,7 @@ export function NotFound(): ReactElement {
       <PageHeading
         title="There is nothing at this address"
         lead="It may have been mistyped, or what stood here has moved. Search for it, or begin again."
-        actions={
-          <Button component={Link} to="/">
-            Go to the front page
-          </Button>
-        }
+        actions={<Press to="/">Go to the front page</Press>}
       />
     </div>
   );
@@ -46,7 +42,7 @@ export function RouteFault(): ReactElement {
             {sentence} {requestId ? `Quote ${requestId} when you report it.` : null}
           </>
         }
-        actions={<Button onClick={() => location.reload()}>Load it again</Button>}
+        actions={<Press onPress={() => location.reload()}>Load it again</Press>}
       />
     </div>
   );

@@ -1,5 +1,4 @@
 import { styled } from '@mui/material/styles';
-import Typography from '@mui/material/Typography';
 import type { ReactElement, ReactNode } from 'react';
 import { useDocumentTitle } from '../lib/document-title';
 
@@ -10,6 +9,7 @@ const Row = styled('div')(({ theme }) => ({
   gap: '12px 24px',
   marginBottom: 18,
   '& > .words': { flex: '1 1 320px', minWidth: 0 },
+  '& h1': { ...theme.typography.h1, margin: 0 },
   '& .lead': { color: theme.vars.palette.tone.inkSoft, margin: '4px 0 0' },
   '& .tags': { display: 'flex', flexWrap: 'wrap', alignItems: 'center', gap: 12, marginBottom: 8 },
   '& > .actions': { display: 'flex', flexWrap: 'wrap', gap: 10 },
@@ -34,14 +34,8 @@ export function PageHeading({ title, documentTitle, lead, tags, actions }: PageH
     <Row>
       <div className="words">
         {tags ? <div className="tags">{tags}</div> : null}
-        <Typography variant="h1" tabIndex={-1}>
-          {title}
-        </Typography>
-        {lead ? (
-          <Typography className="lead" component="div">
-            {lead}
-          </Typography>
-        ) : null}
+        <h1 tabIndex={-1}>{title}</h1>
+        {lead ? <div className="lead">{lead}</div> : null}
       </div>
       {actions ? <div className="actions">{actions}</div> : null}
     </Row>

@@ -1,5 +1,4 @@
 import { styled } from '@mui/material/styles';
-import Typography from '@mui/material/Typography';
 import { useId, type ReactElement, type ReactNode } from 'react';
 
 const Ground = styled('section')(({ theme }) => ({
@@ -8,6 +7,8 @@ const Ground = styled('section')(({ theme }) => ({
     border: `1px solid ${theme.vars.palette.tone.line}`,
     padding: '18px 20px',
   },
+  '& > header > h2': { ...theme.typography.h2, margin: 0 },
+  '& > header > h3': { ...theme.typography.h3, margin: 0 },
   '& > header': { display: 'flex', alignItems: 'baseline', gap: 16, marginBottom: 8 },
   '& > header > :last-of-type:not(:first-of-type)': { marginLeft: 'auto' },
 }));
@@ -25,12 +26,11 @@ interface SheetProps {
 /** A section of a page, with its heading. */
 export function Sheet({ title, children, aside, bare = false, level = 2 }: SheetProps): ReactElement {
   const id = useId();
+  const Heading = level === 2 ? 'h2' : 'h3';
   return (
     <Ground aria-labelledby={id} data-drawn={bare ? undefined : ''}>
       <header>
-        <Typography variant={level === 2 ? 'h2' : 'h3'} component={level === 2 ? 'h2' : 'h3'} id={id}>
-          {title}
-        </Typography>
+        <Heading id={id}>{title}</Heading>
         {aside ? <div>{aside}</div> : null}
       </header>
       {children}

@@ -1,15 +1,14 @@
-import Button from '@mui/material/Button';
-import Skeleton from '@mui/material/Skeleton';
 import { styled } from '@mui/material/styles';
-import Typography from '@mui/material/Typography';
 import type { ReactElement, ReactNode } from 'react';
 import { sentenceOf } from '../lib/problem';
+import { Press } from './press';
 
 const Place = styled('div')(({ theme }) => ({
   padding: '32px 20px',
   border: `1px solid ${theme.vars.palette.tone.line}`,
   background: theme.vars.palette.tone.sheet,
   '& > p': { margin: 0, maxWidth: 560 },
+  '& > .title': theme.typography.h2,
   '& > p + p': { marginTop: 6, color: theme.vars.palette.tone.inkSoft },
   '& > .act': { marginTop: 16, display: 'flex', flexWrap: 'wrap', gap: 10 },
 }));
@@ -25,9 +24,7 @@ interface EmptyStateProps {
 export function EmptyState({ title, children, action }: EmptyStateProps): ReactElement {
   return (
     <Place>
-      <Typography variant="h2" component="p">
-        {title}
-      </Typography>
+      <p className="title">{title}</p>
       {children ? <p>{children}</p> : null}
       {action ? <div className="act">{action}</div> : null}
     </Place>
@@ -45,27 +42,30 @@ export function ErrorState({ error, onRetry, what = 'This' }: ErrorStateProps): 
   const { sentence, requestId } = sentenceOf(error);
   return (
     <Place role="alert">
-      <Typography variant="h2" component="p">
-        {what} can’t be shown just now
-      </Typography>
+      <p className="title">{what} can’t be shown just now</p>
       <p>{sentence}</p>
       {requestId ? <p>Quote {requestId} when you report it.</p> : null}
       {onRetry ? (
         <div className="act">
-          <Button onClick={onRetry}>Try again</Button>
+          <Press onPress={onRetry}>Try again</Press>
         </div>
       ) : null}
     </Place>
   );
 }
 
+const Bars = styled('output')(({ theme }) => ({
+  display: 'block',
+  '& i': { display: 'block', height: 22, margin: '10px 0', borderRadius: 3, background: theme.vars.palette.tone.line },
+}));
+
 /** Where a page's content will be; says that it loads to those who can't see the grey bars. */
 export function LoadingState({ lines = 6, label = 'Loading' }: { lines?: number; label?: string }): ReactElement {
   return (
-    <output aria-label={label} style={{ display: 'block' }}>
+    <Bars aria-label={label}>
       {Array.from({ length: lines }, (_, line) => (
-        <Skeleton key={line} height={22} width={`${88 - (line % 4) * 14}%`} sx={{ my: 1.25 }} />
+        <i key={line} style={{ width: `${88 - (line % 4) * 14}%` }} />
       ))}
-    </output>
+    </Bars>
   );
 }

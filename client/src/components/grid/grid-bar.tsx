@@ -5,7 +5,7 @@ import { apiUrl } from '../../lib/api-url';
 import { formatCount } from '../../lib/format-quantity';
 import { ColumnChoiceButton, type ColumnChoice } from './column-choice';
 import { FilterChips } from './filter-chips';
-import { gridQuery } from './grid-address';
+import { listQuery } from '../../lib/list-state';
 import type { ServerGridModel } from './use-server-grid';
 
 const Bar = styled('div')(({ theme }) => ({
@@ -34,7 +34,7 @@ interface GridBarProps<Row> {
 
 /** What narrows a list, how much of it there is, and its export. */
 export function GridBar<Row>({ grid, counted, exportPath, choice, searchLabel }: GridBarProps<Row>): ReactElement {
-  const { page: _page, pageSize: _size, ...asked } = gridQuery(grid.state);
+  const { page: _page, pageSize: _size, ...asked } = listQuery(grid.state);
   return (
     <Bar>
       <FilterChips grid={grid} searchLabel={searchLabel} />

@@ -2,7 +2,7 @@ import Button from '@mui/material/Button';
 import { styled } from '@mui/material/styles';
 import type { ReactElement } from 'react';
 import { groupDigits } from '../../lib/format-money';
-import { pageSizes } from './grid-address';
+import { pageSizes } from '../../lib/list-state';
 import type { ServerGridModel } from './use-server-grid';
 
 const Row = styled('nav')(({ theme }) => ({

@@ -1,10 +1,10 @@
 import { keepPreviousData, useQuery, type QueryKey, type UseQueryOptions } from '@tanstack/react-query';
 import { useCallback, useMemo } from 'react';
 import { useSearchParams } from 'react-router-dom';
-import { pageSizes, readGridState, writeGridState, type GridState } from './grid-address';
+import { pageSizes, readListState, writeListState, type ListState } from '../../lib/list-state';
 
 /** What every list of the API answers. */
-export interface ListAnswer<Row> {
+export interface ListAnswer<Row = unknown> {
   items: readonly Row[];
   total: number;
 }
@@ -18,10 +18,10 @@ export interface GridFilter {
   kind?: 'day';
 }
 
-export interface ServerGridSettings<Row, Key extends QueryKey> {
+export interface ServerGridSettings<Answer extends ListAnswer, Key extends QueryKey> {
   /** Under which the column choice is remembered. */
   name: string;
-  query: (state: GridState) => UseQueryOptions<ListAnswer<Row>, Error, ListAnswer<Row>, Key>;
+  query: (state: ListState) => UseQueryOptions<Answer, Error, Answer, Key>;
   filters?: readonly GridFilter[];
   defaultSort?: string;
   defaultPageSize?: number;
@@ -29,36 +29,40 @@ export interface ServerGridSettings<Row, Key extends QueryKey> {
 
 const noFilters: readonly GridFilter[] = [];
 
-export interface ServerGridModel<Row> {
+export interface ServerGridModel<Row, Answer extends ListAnswer<Row> = ListAnswer<Row>> {
   name: string;
-  state: GridState;
+  state: ListState;
   filters: readonly GridFilter[];
   rows: readonly Row[];
+  /** The whole of the last answer, for a list that says more than its rows. */
+  answer: Answer | undefined;
   /** Kept from the last answer while the next is loading. */
   total: number | undefined;
   loading: boolean;
   error: Error | null;
   /** Whether anything narrows the list, so that an empty one says the right thing. */
   narrowed: boolean;
-  change: (part: Partial<GridState>) => void;
+  change: (part: Partial<ListState>) => void;
   setFilter: (field: string, value: string | undefined) => void;
   clearFilters: () => void;
   retry: () => void;
 }
 
 /** A list whose page, sort and filters live in the address bar and whose rows come from the server. */
-export function useServerGrid<Row, Key extends QueryKey>(settings: ServerGridSettings<Row, Key>): ServerGridModel<Row> {
+export function useServerGrid<Answer extends ListAnswer, Key extends QueryKey>(
+  settings: ServerGridSettings<Answer, Key>,
+): ServerGridModel<Answer['items'][number], Answer> {
   const { name, query, filters = noFilters, defaultSort, defaultPageSize = pageSizes[0] } = settings;
   const [search, setSearch] = useSearchParams();
   const address = useMemo(
     () => ({ filterFields: filters.map(({ field }) => field), defaultSort, defaultPageSize }),
     [filters, defaultSort, defaultPageSize],
   );
-  const state = useMemo(() => readGridState(search, address), [search, address]);
+  const state = useMemo(() => readListState(search, address), [search, address]);
   const answer = useQuery({ ...query(state), placeholderData: keepPreviousData });
   const change = useCallback(
-    (part: Partial<GridState>): void => {
-      setSearch((now) => writeGridState(now, { ...readGridState(now, address), page: 1, ...part }, address), {
+    (part: Partial<ListState>): void => {
+      setSearch((now) => writeListState(now, { ...readListState(now, address), page: 1, ...part }, address), {
         replace: true,
         preventScrollReset: true,
       });
@@ -70,6 +74,7 @@ export function useServerGrid<Row, Key extends QueryKey>(settings: ServerGridSet
     state,
     filters,
     rows: answer.data?.items ?? [],
+    answer: answer.data,
     total: answer.data?.total,
     loading: answer.isPending || answer.isPlaceholderData,
     error: answer.isError ? answer.error : null,

@@ -1,26 +1,11 @@
 import { queryOptions } from '@tanstack/react-query';
-import { request } from '../../../api/request';
-import { gridQuery, type GridState } from '../../../components/grid/grid-address';
-import type { ListAnswer } from '../../../components/grid/use-server-grid';
+import { list, type RowOf } from '../../../api/list';
+import type { ListState } from '../../../lib/list-state';
 
-export interface AuditEntry {
-  id: number;
-  recordedAt: string;
-  actorId: number | null;
-  /** Null for what the product did by itself. */
-  actorName: string | null;
-  actorRole: string | null;
-  action: string;
-  subjectKind: string;
-  subjectId: number | null;
-  subjectCode: string | null;
-  before: Record<string, unknown> | null;
-  after: Record<string, unknown> | null;
-}
+export type AuditEntry = RowOf<'/api/audit-entries'>;
 
-export const auditQuery = (state: GridState) =>
+export const auditQuery = (state: ListState) =>
   queryOptions({
     queryKey: ['audit', state] as const,
-    queryFn: ({ signal }) =>
-      request<ListAnswer<AuditEntry>>('GET', '/api/audit-entries', { query: gridQuery(state), signal }),
+    queryFn: ({ signal }) => list('/api/audit-entries', state, signal),
   });

@@ -1,61 +1,44 @@
 import { queryOptions, useMutation, type UseMutationResult } from '@tanstack/react-query';
-import { request } from '../../../api/request';
-import type { GridState } from '../../../components/grid/grid-address';
-import { gridQuery } from '../../../components/grid/grid-address';
-import type { ListAnswer } from '../../../components/grid/use-server-grid';
-import type { StaffRole } from '../../../lib/area';
+import { answer, api, type Dto } from '../../../api/client';
+import { list } from '../../../api/list';
+import type { ListState } from '../../../lib/list-state';
 
-export interface StaffMember {
-  id: number;
-  name: string;
-  email: string;
-  role: StaffRole;
-  status: 'invited' | 'unconfirmed' | 'active' | 'disabled';
-  version: number;
-}
+export type StaffMember = Dto<'StaffMemberDto'>;
+export type Invitation = Dto<'InvitationDto'>;
+export type StaffEdit = Dto<'StaffEditDto'> & { id: number };
 
 const staffKey = ['staff'] as const;
 
-export const staffQuery = (state: GridState) =>
+export const staffQuery = (state: ListState) =>
   queryOptions({
     queryKey: [...staffKey, state] as const,
-    queryFn: ({ signal }) => request<ListAnswer<StaffMember>>('GET', '/api/staff', { query: gridQuery(state), signal }),
+    queryFn: ({ signal }) => list('/api/staff', state, signal),
   });
 
-export interface Invitation {
-  name: string;
-  email: string;
-  role: StaffRole;
-}
-
-export function useInvite(): UseMutationResult<StaffMember, Error, { body: Invitation; idempotencyKey: string }> {
+export function useInvite(): UseMutationResult<StaffMember, Error, { body: Invitation; key: string }> {
   return useMutation({
-    mutationFn: (call) => request<StaffMember>('POST', '/api/invitations', call),
+    mutationFn: ({ body, key }) =>
+      answer(api.POST('/api/invitations', { body, params: { header: { 'Idempotency-Key': key } } })),
     meta: { touches: [staffKey], showsRefusal: true },
   });
 }
 
-export function useInviteAgain(): UseMutationResult<void, Error, number> {
-  return useMutation({ mutationFn: (id) => request<void>('POST', `/api/staff/${id}/invitations`) });
-}
-
-export interface StaffEdit {
-  id: number;
-  version: number;
-  role?: StaffRole;
-  status?: 'active' | 'disabled';
+export function useInviteAgain(): UseMutationResult<unknown, Error, number> {
+  return useMutation({
+    mutationFn: (id) => answer(api.POST('/api/staff/{id}/invitations', { params: { path: { id } } })),
+  });
 }
 
 export function useEditStaff(): UseMutationResult<StaffMember, Error, StaffEdit> {
   return useMutation({
-    mutationFn: ({ id, ...body }) => request<StaffMember>('PATCH', `/api/staff/${id}`, { body }),
+    mutationFn: ({ id, ...body }) => answer(api.PATCH('/api/staff/{id}', { body, params: { path: { id } } })),
     meta: { touches: [staffKey, ['session']], showsRefusal: true },
   });
 }
 
-export function useEndStaffSessions(): UseMutationResult<void, Error, number> {
+export function useEndStaffSessions(): UseMutationResult<unknown, Error, number> {
   return useMutation({
-    mutationFn: (id) => request<void>('DELETE', `/api/staff/${id}/sessions`),
+    mutationFn: (id) => answer(api.DELETE('/api/staff/{id}/sessions', { params: { path: { id } } })),
     meta: { showsRefusal: true },
   });
 }

@@ -22,7 +22,7 @@ export function Component(): ReactElement {
     defaultValues: { name: '', email: '', role: 'assembler' },
   });
   const send = async (body: Invitation): Promise<void> => {
-    await invite.mutateAsync({ body, idempotencyKey: keyFor(body) });
+    await invite.mutateAsync({ body, key: keyFor(body) });
     done();
     notify(`An invitation is on its way to ${body.email}. It works for a week.`);
     await navigate(back);

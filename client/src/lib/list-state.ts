@@ -1,5 +1,5 @@
 /** What a list shows, as the address bar holds it: `?q=clamp&bin=A-12&sort=-code&page=2`. */
-export interface GridState {
+export interface ListState {
   q: string;
   filters: Readonly<Record<string, string>>;
   /** A column's field, with `-` before it for falling order. */
@@ -9,7 +9,7 @@ export interface GridState {
   pageSize: number;
 }
 
-export interface GridAddressSettings {
+export interface ListAddressSettings {
   filterFields: readonly string[];
   defaultSort?: string;
   defaultPageSize: number;
@@ -24,7 +24,7 @@ function wholeAtLeastOne(text: string | null): number | undefined {
 }
 
 /** Reads the address; what it does not understand it leaves at its usual value. */
-export function readGridState(search: URLSearchParams, settings: GridAddressSettings): GridState {
+export function readListState(search: URLSearchParams, settings: ListAddressSettings): ListState {
   const filters: Record<string, string> = {};
   for (const field of settings.filterFields) {
     const value = search.get(field);
@@ -41,10 +41,10 @@ export function readGridState(search: URLSearchParams, settings: GridAddressSett
 }
 
 /** Writes the state into an address, leaving out what is usual and keeping what belongs to others. */
-export function writeGridState(
+export function writeListState(
   search: URLSearchParams,
-  state: GridState,
-  settings: GridAddressSettings,
+  state: ListState,
+  settings: ListAddressSettings,
 ): URLSearchParams {
   const next = new URLSearchParams(search);
   const put = (name: string, value: string | undefined): void => {
@@ -60,6 +60,6 @@ export function writeGridState(
 }
 
 /** What the server is asked, in the words of every list of the API. */
-export function gridQuery(state: GridState): Record<string, string | number | undefined> {
+export function listQuery(state: ListState): Record<string, string | number | undefined> {
   return { ...state.filters, q: state.q || undefined, sort: state.sort, page: state.page, pageSize: state.pageSize };
 }
