@@ -9,7 +9,7 @@ const Ground = styled('section')(({ theme }) => ({
   },
   '& > header > h2': { ...theme.typography.h2, margin: 0 },
   '& > header > h3': { ...theme.typography.h3, margin: 0 },
-  '& > header': { display: 'flex', alignItems: 'baseline', gap: 16, marginBottom: 8 },
+  '& > header': { display: 'flex', alignItems: 'baseline', gap: 16, marginBottom: 10 },
   '& > header > :last-of-type:not(:first-of-type)': { marginLeft: 'auto' },
 }));
 

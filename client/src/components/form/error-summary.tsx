@@ -1,6 +1,7 @@
 import { styled } from '@mui/material/styles';
 import { useEffect, useRef, type ReactElement } from 'react';
 import { useFormState } from 'react-hook-form';
+import { capital, numberWord } from '../../lib/number-words';
 import { fieldId } from './field-names';
 import { faultsOf } from './server-faults';
 
@@ -58,5 +59,5 @@ export function ErrorSummary({ attempt, refusal }: ErrorSummaryProps): ReactElem
 }
 
 function headline(count: number): string {
-  return count === 1 ? 'One thing to put right' : `${count} things to put right`;
+  return count === 1 ? 'One thing to put right' : `${capital(numberWord(count))} things to put right`;
 }

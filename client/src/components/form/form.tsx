@@ -14,8 +14,8 @@ const Frame = styled('form')(({ theme }) => ({
   maxWidth: 640,
   '& .acts': { display: 'flex', flexWrap: 'wrap', gap: 10, marginTop: 6 },
   '& .kept': { margin: 0, fontSize: '0.8125rem', color: theme.vars.palette.tone.inkSoft },
-  '& fieldset': { border: 0, margin: 0, padding: 0, display: 'grid', gap: 18, minWidth: 0 },
-  '& fieldset > legend': { ...theme.typography.h2, padding: 0, marginBottom: 10 },
+  '& > fieldset': { border: 0, margin: 0, padding: 0, display: 'grid', gap: 18, minWidth: 0 },
+  '& > fieldset > legend': { ...theme.typography.h2, padding: 0, marginBottom: 10 },
 }));
 
 interface FormProps<Values extends FieldValues> {

@@ -6,7 +6,7 @@ import { signOut } from '../../../api/sign-out';
 import { PageHeading } from '../../../components/page-heading';
 import { Sheet } from '../../../components/sheet';
 import { ErrorState, LoadingState } from '../../../components/states';
-import { formatInstant } from '../../../lib/format-time';
+import { formatDay, shopDay } from '../../../lib/format-time';
 import { profileQuery } from '../api/account';
 import { AddressForm, NameForm, PasswordForm } from '../components/profile-forms';
 import { SessionList } from '../components/session-list';
@@ -31,12 +31,12 @@ export function Component(): ReactElement {
       <PageHeading
         title={profile.data.name}
         documentTitle="Profile"
-        lead={`${profile.data.email}. Here since ${formatInstant(profile.data.memberSince).split(',')[0]}.`}
+        lead={`${profile.data.email}. Here since ${formatDay(shopDay(profile.data.memberSince))}.`}
         actions={<Button onClick={() => void signOut()}>Sign out</Button>}
       />
       <Columns>
         <div>
-          <Sheet title="Name">
+          <Sheet title="What you are called">
             <NameForm key={profile.data.version} profile={profile.data} />
           </Sheet>
           <Sheet title="Where you are signed in">
