@@ -17,7 +17,7 @@ const serverRows = [
   ['stock', 'journal', 'invoicing'],
   ['planning', 'purchasing', 'builds', 'units', 'testing', 'imports'],
   ['catalogue', 'orders', 'payments', 'shipping', 'returns', 'recalls'],
-  ['books', 'today', 'find'],
+  ['books', 'today', 'find', 'doctor'],
   ['demo'],
 ];
 
