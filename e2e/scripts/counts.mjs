@@ -1,12 +1,12 @@
 // The file in which every runner notes how many tests passed and failed, and their sum.
 import { appendFileSync, existsSync, readFileSync } from 'node:fs';
 
-/** Prints the closing line of one runner and notes it for the run that called it, if there is one. */
+/** Notes the counts of one runner for the run that called it; on its own, prints them as a closing line. */
 export function noteCounts({ passed, failed }) {
   const line = `${passed} passed, ${failed} failed`;
-  process.stdout.write(`${line}\n`);
   const file = process.env.EMBERLOT_COUNT_FILE;
   if (file) appendFileSync(file, `${line}\n`);
+  else process.stdout.write(`${line}\n`);
 }
 
 /** @param {string} file @returns {{ passed: number, failed: number }} */

@@ -23,7 +23,8 @@ let interrupted = false;
  * Runs one step in a process group of its own, which the guard ends should this process end first.
  * @returns {Promise<{ passed: number, failed: number }>} a step that fails without a failed test is one failure
  */
-function run(name, args, { env, guard, folder }) {
+async function run(name, args, { env, guard, folder }) {
+  if (interrupted) return { passed: 0, failed: 0 };
   const started = Date.now();
   const counts = join(folder, name);
   report(`\n=== ${name}`);
