@@ -18,6 +18,150 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/bins': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Bins_list'];
+    put?: never;
+    post: operations['Bins_create'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bins/{code}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Bins_get'];
+    put: operations['Bins_edit'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bins/{code}/bring-back': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Bins_bringBack'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bins/{code}/retire': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Bins_retire'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/countries': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Shop_countries'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/deliveries': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Deliveries_list'];
+    put?: never;
+    post: operations['Deliveries_receive'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/deliveries/{number}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Deliveries_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/delivery-rates': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['TaxSettings_deliveryRates'];
+    put?: never;
+    post: operations['TaxSettings_addDeliveryRate'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/delivery-rates/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post?: never;
+    delete: operations['TaxSettings_removeDeliveryRate'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/email-change-completions': {
     parameters: {
       query?: never;
@@ -131,6 +275,55 @@ export interface paths {
     put?: never;
     /** Asks somebody to join the staff, by mail. */
     post: operations['Staff_invite'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/lots': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Lots_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/lots/{code}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Lots_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/lots/{code}/status': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Anybody at the bench may hold a lot back; to let it go again is the owner's. */
+    post: operations['Lots_changeStatus'];
     delete?: never;
     options?: never;
     head?: never;
@@ -350,6 +543,54 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/shop': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Shop_read'];
+    put: operations['Shop_edit'];
+    post: operations['Shop_setUp'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/shop/closed-days': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Shop_closedDays'];
+    put?: never;
+    post: operations['Shop_close'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/shop/closed-days/{day}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post?: never;
+    delete: operations['Shop_open'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/sign-up-completions': {
     parameters: {
       query?: never;
@@ -451,6 +692,71 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/stock-adjustments': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['StockMoves_adjust'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/stock-documents/{number}/reversal': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Takes back a delivery, transfer or adjustment that was wrong, by a document that does the opposite. */
+    post: operations['StockMoves_reverse'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/stock-moves': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['StockMoves_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/stock-transfers': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['StockMoves_transfer'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/suppliers': {
     parameters: {
       query?: never;
@@ -483,10 +789,95 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/vat-exceptions': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['TaxSettings_vatExceptions'];
+    put?: never;
+    post: operations['TaxSettings_addVatException'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/vat-exceptions/{country}/{prefix}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post?: never;
+    delete: operations['TaxSettings_removeVatException'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/vat-rates': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['TaxSettings_vatRates'];
+    put?: never;
+    post: operations['TaxSettings_addVatRate'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/vat-rates/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post?: never;
+    delete: operations['TaxSettings_removeVatRate'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
 }
 export type webhooks = Record<string, never>;
 export interface components {
   schemas: {
+    AdjustmentInputDto: {
+      lines: components['schemas']['AdjustmentLineDto'][];
+      /** @description What happened, for whoever reads it later. */
+      note: string;
+      /** @enum {string} */
+      reason: 'found' | 'lost' | 'damaged' | 'counted';
+    };
+    AdjustmentLineDto: {
+      bin: string;
+      /** @description Not needed for a part followed by count. */
+      lot?: string | null;
+      part: string;
+      /**
+       * Format: decimal
+       * @description How much was found, lost or damaged; where it was counted, how much lies there.
+       * @example 12.5
+       */
+      quantity: string;
+      /** @description Cost of one stock unit of what was found, in the shop's currency; left out, the shelf's average counts. */
+      unitCost?: string | null;
+    };
     AuditEntryDto: {
       action: string;
       actorId: number | null;
@@ -508,6 +899,191 @@ export interface components {
     };
     AuditPageDto: {
       items: components['schemas']['AuditEntryDto'][];
+      total: number;
+    };
+    BinContentDto: {
+      expiresOn: string | null;
+      lot: string;
+      lotStatus: string;
+      measure: string;
+      name: string;
+      part: string;
+      quantity: string;
+      traced: string;
+    };
+    BinDto: {
+      code: string;
+      contents: components['schemas']['BinContentDto'][];
+      id: number;
+      name: string;
+      /** @description What lies in a quarantine bin can be neither picked nor sold. */
+      quarantine: boolean;
+      retired: boolean;
+      version: number;
+    };
+    BinEditDto: {
+      code: string;
+      name: string;
+      /** @description What lies in a quarantine bin can be neither picked nor sold. */
+      quarantine: boolean;
+      version: number;
+    };
+    BinInputDto: {
+      code: string;
+      name: string;
+      /** @description What lies in a quarantine bin can be neither picked nor sold. */
+      quarantine: boolean;
+    };
+    BinItemDto: {
+      code: string;
+      id: number;
+      lotCount: number;
+      name: string;
+      partCount: number;
+      quarantine: boolean;
+      retired: boolean;
+    };
+    BinPageDto: {
+      items: components['schemas']['BinItemDto'][];
+      total: number;
+    };
+    BinRetireDto: {
+      version: number;
+    };
+    ClosedDayDto: {
+      /**
+       * Format: date
+       * @example 2027-02-28
+       */
+      day: string;
+      name: string;
+    };
+    ClosedDayInputDto: {
+      /**
+       * Format: date
+       * @example 2027-02-28
+       */
+      day: string;
+      name: string;
+    };
+    ClosedDaysDto: {
+      items: components['schemas']['ClosedDayDto'][];
+      total: number;
+    };
+    CountriesDto: {
+      items: components['schemas']['CountryDto'][];
+      total: number;
+    };
+    CountryDto: {
+      code: string;
+      /** @description Whether its goods are inside the European Union's VAT area. */
+      inUnion: boolean;
+      name: string;
+    };
+    DeliveryDto: {
+      deliveryNote: string | null;
+      lineCount: number;
+      lines: components['schemas']['DeliveryLineDto'][];
+      note: string | null;
+      number: string;
+      occurredAt: string;
+      receivedOn: string;
+      recordedBy: string | null;
+      /** @description The number of the document that reversed it. */
+      reversedBy: string | null;
+      supplier: string;
+      supplierName: string;
+      /** @description Not shown to assemblers. */
+      value?: components['schemas']['MoneyDto'];
+    };
+    DeliveryInputDto: {
+      deliveryNote?: string | null;
+      lines: components['schemas']['DeliveryLineInputDto'][];
+      note?: string | null;
+      /**
+       * Format: date
+       * @example 2027-02-28
+       */
+      receivedOn: string;
+      supplier: string;
+    };
+    DeliveryItemDto: {
+      deliveryNote: string | null;
+      lineCount: number;
+      number: string;
+      receivedOn: string;
+      recordedBy: string | null;
+      /** @description The number of the document that reversed it. */
+      reversedBy: string | null;
+      supplier: string;
+      supplierName: string;
+      /** @description Not shown to assemblers. */
+      value?: components['schemas']['MoneyDto'];
+    };
+    DeliveryLineDto: {
+      bin: string;
+      expiresOn: string | null;
+      lot: string;
+      lotStatus: string;
+      measure: string;
+      name: string;
+      part: string;
+      quantity: string;
+      supplierLot: string | null;
+      /** @description Not shown to assemblers. */
+      unitCost?: string;
+      value?: components['schemas']['MoneyDto'];
+    };
+    DeliveryLineInputDto: {
+      bin: string;
+      /**
+       * Format: date
+       * @example 2027-02-28
+       */
+      expiresOn?: string | null;
+      /** @description Kept back until somebody has looked at it; for parts followed by delivery. */
+      held: boolean;
+      /** @description Value of the whole line without VAT, in minor units of the shop's currency. */
+      lineValueMinor?: number | null;
+      part: string;
+      /**
+       * Format: decimal
+       * @description In the part's stock unit.
+       * @example 12.5
+       */
+      quantity: string;
+      /** @description What the supplier calls the lot; for parts followed by delivery. */
+      supplierLot?: string | null;
+      /** @description Price of one stock unit without VAT, in the shop's currency; or give the value of the line. */
+      unitPrice?: string | null;
+    };
+    DeliveryPageDto: {
+      items: components['schemas']['DeliveryItemDto'][];
+      total: number;
+    };
+    DeliveryRateDto: {
+      carriesLithium: boolean;
+      countryCode: string;
+      id: number;
+      net: components['schemas']['MoneyDto'];
+      transitDays: number;
+      validFrom: string;
+    };
+    DeliveryRateInputDto: {
+      /** @description Whether parcels with lithium cells or batteries can go this way. */
+      carriesLithium: boolean;
+      countryCode: string;
+      /** @description Net price, in minor units of the shop's currency. */
+      netMinor: number;
+      transitDays: number;
+      /**
+       * Format: date
+       * @example 2027-02-28
+       */
+      validFrom: string;
+    };
+    DeliveryRatesDto: {
+      items: components['schemas']['DeliveryRateDto'][];
       total: number;
     };
     EmailChangeDto: {
@@ -580,8 +1156,113 @@ export interface components {
       password: string;
       token: string;
     };
+    LotBatchDto: {
+      number: string;
+      part: string;
+      quantity: string;
+    };
+    LotDto: {
+      /** @description Which batches took of it. */
+      batches: components['schemas']['LotBatchDto'][];
+      bins: string[];
+      code: string;
+      currency?: string;
+      expired: boolean;
+      expiresOn: string | null;
+      kind: string;
+      measure: string;
+      moves: components['schemas']['MoveDto'][];
+      name: string;
+      note: string | null;
+      /** @description The document that brought it, and what kind that is. */
+      origin: string | null;
+      originKind: string | null;
+      part: string;
+      places: components['schemas']['LotPlaceDto'][];
+      /** @description What of it lies on the shelf, over all bins. */
+      quantity: string;
+      receivedOn: string | null;
+      /** @enum {string} */
+      status: 'held' | 'released' | 'rejected';
+      statusChanges: components['schemas']['LotStatusChangeDto'][];
+      supplier: string | null;
+      supplierLot: string | null;
+      /** @description What one unit cost when it came. Not shown to assemblers. */
+      unitCost?: string;
+      version: number;
+    };
+    LotItemDto: {
+      bins: string[];
+      code: string;
+      expired: boolean;
+      expiresOn: string | null;
+      kind: string;
+      measure: string;
+      name: string;
+      part: string;
+      /** @description What of it lies on the shelf, over all bins. */
+      quantity: string;
+      receivedOn: string | null;
+      /** @enum {string} */
+      status: 'held' | 'released' | 'rejected';
+      supplier: string | null;
+      supplierLot: string | null;
+    };
+    LotPageDto: {
+      items: components['schemas']['LotItemDto'][];
+      total: number;
+    };
+    LotPlaceDto: {
+      bin: string;
+      quantity: string;
+      quarantine: boolean;
+    };
+    LotStatusChangeDto: {
+      document: string;
+      from: string;
+      occurredAt: string;
+      person: string | null;
+      reason: string;
+      to: string;
+    };
+    LotStatusInputDto: {
+      /** @description Why, for whoever asks later. */
+      reason: string;
+      /** @enum {string} */
+      status: 'held' | 'released' | 'rejected';
+      version: number;
+    };
     /** @enum {string} */
     MailState: 'waiting' | 'sent' | 'given_up' | 'uncertain';
+    MoneyDto: {
+      /** @description In minor units: 1250 is 12.50 in a currency with two decimals. */
+      amount: number;
+      currency: string;
+    };
+    MoveDto: {
+      bin: string;
+      document: string;
+      documentKind: string;
+      id: number;
+      lot: string;
+      measure: string;
+      /** @description The document's note. */
+      note: string | null;
+      occurredAt: string;
+      part: string;
+      person: string | null;
+      /** @description Signed: above zero in, below zero out. */
+      quantity: string;
+      reason: string;
+      /** @description Whether the document can still be reversed from here: it is a delivery, transfer or adjustment, and was not. */
+      reversible: boolean;
+      /** @description Not shown to assemblers. */
+      value?: components['schemas']['MoneyDto'];
+    };
+    MovePageDto: {
+      items: components['schemas']['MoveDto'][];
+      total: number;
+    };
     OutboxMailDto: {
       attempts: number;
       createdAt: string;
@@ -799,6 +1480,10 @@ export interface components {
       name: string;
       version: number;
     };
+    ReversalInputDto: {
+      /** @description Why it was wrong. */
+      reason: string;
+    };
     /** @enum {string} */
     Role: 'owner' | 'assembler' | 'accountant' | 'customer';
     SessionDto: {
@@ -815,6 +1500,120 @@ export interface components {
       currency: string;
       name: string;
       timeZone: string;
+    };
+    ShopAnswerDto: {
+      /** @description Null until the owner has set the shop up. */
+      shop: components['schemas']['ShopDto'] | null;
+      /** @description The zone of the shop's days, which is set where the server is started. */
+      zone: string;
+    };
+    ShopDto: {
+      addressLine: string;
+      bankName?: string | null;
+      /** @description How long goods stay claimed for a buyer on the payment page. */
+      checkoutHoldMinutes: number;
+      city: string;
+      countryCode: string;
+      /** @description Of the books; it stays once something is posted. */
+      currency: string;
+      /** @description Whether the currency stays, because something is posted in it. */
+      currencyStays: boolean;
+      /** Format: email */
+      email: string;
+      /** @description Working days from an order to its parcel. */
+      handlingDays: number;
+      iban?: string | null;
+      /** @description Cost of an hour at the bench, in minor units. */
+      labourRateMinor: number;
+      /** @description As it stands on invoices. */
+      legalName: string;
+      /** @description As customers know it. */
+      name: string;
+      /**
+       * Format: date
+       * @description First day on which destination VAT is charged to consumers elsewhere in the union; null: not elected.
+       * @example 2027-02-28
+       */
+      oneStopShopFrom?: string | null;
+      phone?: string | null;
+      postcode: string;
+      registrationNumber?: string | null;
+      vatNumber?: string | null;
+      version: number;
+      warrantyMonths: number;
+      /** @description ISO weekdays on which the shop works: Monday 1 to Sunday 7. */
+      workingWeekdays: number[];
+      /** @description The zone of its days, set where the server is started. */
+      zone: string;
+    };
+    ShopEditDto: {
+      addressLine: string;
+      bankName?: string | null;
+      /** @description How long goods stay claimed for a buyer on the payment page. */
+      checkoutHoldMinutes: number;
+      city: string;
+      countryCode: string;
+      /** @description Of the books; it stays once something is posted. */
+      currency: string;
+      /** Format: email */
+      email: string;
+      /** @description Working days from an order to its parcel. */
+      handlingDays: number;
+      iban?: string | null;
+      /** @description Cost of an hour at the bench, in minor units. */
+      labourRateMinor: number;
+      /** @description As it stands on invoices. */
+      legalName: string;
+      /** @description As customers know it. */
+      name: string;
+      /**
+       * Format: date
+       * @description First day on which destination VAT is charged to consumers elsewhere in the union; null: not elected.
+       * @example 2027-02-28
+       */
+      oneStopShopFrom?: string | null;
+      phone?: string | null;
+      postcode: string;
+      registrationNumber?: string | null;
+      vatNumber?: string | null;
+      version: number;
+      warrantyMonths: number;
+      /** @description ISO weekdays on which the shop works: Monday 1 to Sunday 7. */
+      workingWeekdays: number[];
+    };
+    ShopInputDto: {
+      addressLine: string;
+      bankName?: string | null;
+      /** @description How long goods stay claimed for a buyer on the payment page. */
+      checkoutHoldMinutes: number;
+      city: string;
+      countryCode: string;
+      /** @description Of the books; it stays once something is posted. */
+      currency: string;
+      /** Format: email */
+      email: string;
+      /** @description Working days from an order to its parcel. */
+      handlingDays: number;
+      iban?: string | null;
+      /** @description Cost of an hour at the bench, in minor units. */
+      labourRateMinor: number;
+      /** @description As it stands on invoices. */
+      legalName: string;
+      /** @description As customers know it. */
+      name: string;
+      /**
+       * Format: date
+       * @description First day on which destination VAT is charged to consumers elsewhere in the union; null: not elected.
+       * @example 2027-02-28
+       */
+      oneStopShopFrom?: string | null;
+      phone?: string | null;
+      postcode: string;
+      registrationNumber?: string | null;
+      vatNumber?: string | null;
+      warrantyMonths: number;
+      /** @description ISO weekdays on which the shop works: Monday 1 to Sunday 7. */
+      workingWeekdays: number[];
     };
     SignInDto: {
       /** Format: email */
@@ -851,6 +1650,9 @@ export interface components {
     };
     /** @enum {string} */
     StaffRole: 'owner' | 'assembler' | 'accountant';
+    StockDocumentDto: {
+      number: string;
+    };
     SuppliedPartDto: {
       code: string;
       leadTimeDays: number | null;
@@ -924,8 +1726,74 @@ export interface components {
       items: components['schemas']['SupplierItemDto'][];
       total: number;
     };
+    TransferInputDto: {
+      lines: components['schemas']['TransferLineDto'][];
+      note?: string | null;
+    };
+    TransferLineDto: {
+      /** @description Where it lies. */
+      bin: string;
+      /** @description Not needed for a part followed by count. */
+      lot?: string | null;
+      part: string;
+      /**
+       * Format: decimal
+       * @example 12.5
+       */
+      quantity: string;
+      /** @description Where it goes. */
+      toBin: string;
+    };
     /** @enum {string} */
     UserStatus: 'invited' | 'unconfirmed' | 'active' | 'disabled';
+    VatExceptionDto: {
+      countryCode: string;
+      /** @description The beginning of the postcodes it holds for. */
+      postcodePrefix: string;
+      /** @description What the buyer is told. */
+      sentence: string;
+    };
+    VatExceptionInputDto: {
+      countryCode: string;
+      /** @description The beginning of the postcodes it holds for. */
+      postcodePrefix: string;
+      /** @description What the buyer is told. */
+      sentence: string;
+    };
+    VatExceptionsDto: {
+      items: components['schemas']['VatExceptionDto'][];
+      total: number;
+    };
+    VatRateDto: {
+      countryCode: string;
+      id: number;
+      /** @description Percent. */
+      rate: string;
+      /** @description Where the rate was read. */
+      source: string;
+      /**
+       * Format: date
+       * @example 2027-02-28
+       */
+      validFrom: string;
+      validUntil: string | null;
+    };
+    VatRateInputDto: {
+      countryCode: string;
+      /** @description Percent. */
+      rate: string;
+      /** @description Where the rate was read. */
+      source: string;
+      /**
+       * Format: date
+       * @example 2027-02-28
+       */
+      validFrom: string;
+    };
+    VatRatesDto: {
+      items: components['schemas']['VatRateDto'][];
+      total: number;
+    };
   };
   responses: never;
   parameters: never;
@@ -968,6 +1836,429 @@ export interface operations {
         content: {
           'application/json': components['schemas']['AuditPageDto'];
         };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bins_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        quarantine?: boolean;
+        /** @description Also the ones no longer in use. */
+        retired?: boolean;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BinPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bins_create: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BinInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BinDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bins_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BinDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bins_edit: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BinEditDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BinDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bins_bringBack: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BinRetireDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BinDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bins_retire: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BinRetireDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BinDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Shop_countries: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['CountriesDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Deliveries_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+        /** @description A supplier's code. */
+        supplier?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['DeliveryPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Deliveries_receive: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['DeliveryInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['DeliveryDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Deliveries_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['DeliveryDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  TaxSettings_deliveryRates: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['DeliveryRatesDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  TaxSettings_addDeliveryRate: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['DeliveryRateInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['DeliveryRateDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  TaxSettings_removeDeliveryRate: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {
@@ -1182,6 +2473,116 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['StaffMemberDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Lots_list: {
+    parameters: {
+      query?: {
+        /** @description A bin's code: lots of which something lies there. */
+        bin?: string;
+        /** @description Out of date, or within thirty days. */
+        expiring?: boolean;
+        page?: number;
+        pageSize?: number;
+        /** @description A part's code. */
+        part?: string;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+        status?: 'held' | 'released' | 'rejected';
+        /** @description A supplier's code. */
+        supplier?: string;
+        /** @description Also the ones of which nothing is left. */
+        used?: boolean;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['LotPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Lots_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['LotDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Lots_changeStatus: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['LotStatusInputDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['LotDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */
@@ -1716,6 +3117,186 @@ export interface operations {
       };
     };
   };
+  Shop_read: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ShopAnswerDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Shop_edit: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ShopEditDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ShopDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Shop_setUp: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ShopInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ShopDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Shop_closedDays: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ClosedDaysDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Shop_close: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ClosedDayInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ClosedDayDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Shop_open: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        day: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   Accounts_completeSignUp: {
     parameters: {
       query?: never;
@@ -1903,6 +3484,156 @@ export interface operations {
       };
     };
   };
+  StockMoves_adjust: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['AdjustmentInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StockDocumentDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  StockMoves_reverse: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ReversalInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StockDocumentDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  StockMoves_list: {
+    parameters: {
+      query?: {
+        bin?: string;
+        /** @description First day, in the shop's zone. */
+        from?: string;
+        lot?: string;
+        page?: number;
+        pageSize?: number;
+        part?: string;
+        /** @description Words to look for. */
+        q?: string;
+        reason?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+        /** @description Last day, in the shop's zone. */
+        to?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['MovePageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  StockMoves_transfer: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['TransferInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StockDocumentDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   Suppliers_list: {
     parameters: {
       query?: {
@@ -2025,6 +3756,183 @@ export interface operations {
         content: {
           'application/json': components['schemas']['SupplierDto'];
         };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  TaxSettings_vatExceptions: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['VatExceptionsDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  TaxSettings_addVatException: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['VatExceptionInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['VatExceptionDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  TaxSettings_removeVatException: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        country: string;
+        prefix: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  TaxSettings_vatRates: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['VatRatesDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  TaxSettings_addVatRate: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['VatRateInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['VatRateDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  TaxSettings_removeVatRate: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {

@@ -9,6 +9,7 @@ export interface DocumentRow {
   readonly occurredAt: Date;
   readonly recordedBy: number | null;
   readonly note: string | null;
+  readonly reverses: number | null;
 }
 
 @Injectable()
@@ -22,6 +23,7 @@ export class DocumentsRepository {
         occurred_at: row.occurredAt,
         recorded_by: row.recordedBy,
         note: row.note,
+        reverses_document_id: row.reverses,
       })
       .returning('id')
       .executeTakeFirstOrThrow();

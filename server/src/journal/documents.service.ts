@@ -13,6 +13,8 @@ export interface NewDocument {
   /** Who recorded it; nobody for what an outside service reports. */
   readonly recordedBy: number | null;
   readonly note?: string | undefined;
+  /** Of a reversal: the document that it takes back. */
+  readonly reverses?: number;
 }
 
 /** A document as moves and entries need it. */
@@ -38,7 +40,14 @@ export class DocumentsService {
     const number = document.number ?? (await this.nextNumber(trx, document.kind));
     const occurredAt = this.clock.now();
     const { kind, recordedBy } = document;
-    const id = await this.repository.insert(trx, { kind, number, occurredAt, recordedBy, note: document.note ?? null });
+    const id = await this.repository.insert(trx, {
+      kind,
+      number,
+      occurredAt,
+      recordedBy,
+      note: document.note ?? null,
+      reverses: document.reverses ?? null,
+    });
     return { id, kind, number, occurredAt, recordedBy };
   }
 

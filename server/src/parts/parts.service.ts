@@ -139,8 +139,8 @@ export class PartsService {
       subjectKind: 'part',
       subjectId: change.after.id,
       subjectCode: change.after.code,
-      ...(change.before && { before: { ...change.before } }),
-      after: { ...change.after },
+      ...(change.before && { before: change.before }),
+      after: change.after,
     });
   }
 }

@@ -13,6 +13,11 @@ export type Shop = ShopRow;
 export class ShopService {
   constructor(private readonly repository: ShopRepository) {}
 
+  /** The shop, or nothing while it has not been set up. */
+  async find(handle: Kysely<DB>): Promise<Shop | undefined> {
+    return this.repository.find(handle);
+  }
+
   /** @throws AppError `wrong_state` while the shop has not been set up */
   async get(handle: Kysely<DB>): Promise<Shop> {
     const shop = await this.repository.find(handle);

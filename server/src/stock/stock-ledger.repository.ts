@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import type { DB } from '@emberlot/db/database.types';
-import type { Transaction } from 'kysely';
+import { sql, type Kysely, type Transaction } from 'kysely';
 
 export interface LockedPart {
   readonly id: number;
@@ -26,7 +26,11 @@ export interface MoveRow {
   readonly reason: string;
   readonly occurredAt: Date;
   readonly recordedBy: number | null;
+  readonly reverses: number | null;
 }
+
+/** PostgreSQL takes 65,535 parameters in a statement, and a move has twelve. */
+const movesPerStatement = 5_000;
 
 @Injectable()
 export class StockLedgerRepository {
@@ -39,22 +43,28 @@ export class StockLedgerRepository {
     return trx
       .selectFrom('part')
       .select(['id', 'code', 'traced'])
-      .where('id', 'in', [...partIds])
+      .where('id', '=', anyOf(partIds))
       .orderBy('id')
       .forNoKeyUpdate()
       .execute();
   }
 
-  async poolsOf(trx: Transaction<DB>, partIds: readonly number[], lotIds: readonly number[]): Promise<PoolRow[]> {
-    return trx
+  async poolsOf(handle: Kysely<DB>, partIds: readonly number[], lotIds: readonly number[]): Promise<PoolRow[]> {
+    return handle
       .selectFrom('cost_pool')
       .select(['part_id as partId', 'lot_id as lotId', 'quantity', 'value_minor as value'])
-      .where('part_id', 'in', [...partIds])
-      .where((where) => where.or([where('lot_id', 'is', null), where('lot_id', 'in', [...lotIds])]))
+      .where('part_id', '=', anyOf(partIds))
+      .where((where) => where.or([where('lot_id', 'is', null), where('lot_id', '=', anyOf(lotIds))]))
       .execute();
   }
 
   async insertMoves(trx: Transaction<DB>, moves: readonly MoveRow[]): Promise<void> {
+    for (let start = 0; start < moves.length; start += movesPerStatement) {
+      await this.insertSome(trx, moves.slice(start, start + movesPerStatement));
+    }
+  }
+
+  private async insertSome(trx: Transaction<DB>, moves: readonly MoveRow[]): Promise<void> {
     await trx
       .insertInto('stock_move')
       .values(
@@ -69,8 +79,13 @@ export class StockLedgerRepository {
           reason: move.reason,
           occurred_at: move.occurredAt,
           recorded_by: move.recordedBy,
+          reverses_move_id: move.reverses,
         })),
       )
       .execute();
   }
+}
+
+function anyOf(ids: readonly number[]) {
+  return sql<number>`any(${[...new Set(ids)]}::bigint[])`;
 }

@@ -10,7 +10,8 @@ import {
   receiveIntoPool,
   type CostPool,
 } from '@emberlot/shared/money/movement-value';
-import type { Transaction } from 'kysely';
+import { takeBackFromPool } from '@emberlot/shared/money/take-back';
+import type { Kysely, Transaction } from 'kysely';
 import type { RecordedDocument } from '../journal/documents.service.js';
 import { AppError } from '../platform/errors/app-error.js';
 import { ShopService } from '../settings/shop.service.js';
@@ -60,6 +61,19 @@ export class StockLedgerService {
     return posted.map(({ move }) => move);
   }
 
+  /** What one stock unit of a part costs on average, in major units; parts of which nothing lies are left out. */
+  async averages(handle: Kysely<DB>, partIds: readonly number[]): Promise<ReadonlyMap<number, Decimal>> {
+    if (partIds.length === 0) return new Map();
+    const rows = await this.repository.poolsOf(handle, partIds, []);
+    const exponent = await this.shop.exponent(handle);
+    return new Map(
+      rows.flatMap((row) => {
+        const average = averageUnitCost(costPool(row.quantity, minorAmount(row.value)), exponent);
+        return average ? [[row.partId, average] as const] : [];
+      }),
+    );
+  }
+
   private async pools(trx: Transaction<DB>, moves: readonly NewMove[]): Promise<Map<string, CostPool>> {
     const rows = await this.repository.poolsOf(
       trx,
@@ -77,8 +91,8 @@ export class StockLedgerService {
     const base = { partId, lotId, component };
     if (move.direction === 'within') {
       return [
-        { reason, move: { ...base, binId, quantity: quantity.negated(), value: zeroAmount } },
-        { reason, move: { ...base, binId: move.toBinId, quantity, value: zeroAmount } },
+        { reason, move: { ...base, ...reversing(move, 0), binId, quantity: quantity.negated(), value: zeroAmount } },
+        { reason, move: { ...base, ...reversing(move, 1), binId: move.toBinId, quantity, value: zeroAmount } },
       ];
     }
     const key = poolKey(partId, part.traced === 'single' ? lotId : null);
@@ -86,7 +100,7 @@ export class StockLedgerService {
     if (move.direction === 'in') {
       const { value, pool } = receiveIntoPool(before, quantity, move.value);
       pools.set(key, pool);
-      return [{ reason, move: { ...base, binId, quantity, value } }];
+      return [{ reason, move: { ...base, ...reversing(move, 0), binId, quantity, value } }];
     }
     if (quantity.greaterThan(before.quantity)) {
       throw new AppError(
@@ -94,9 +108,12 @@ export class StockLedgerService {
         `There are only ${before.quantity.toFixed()} of ${part.code} left, and ${quantity.toFixed()} were asked for.`,
       );
     }
-    const { value, pool } = issueFromPool(before, quantity);
+    const { value, pool } =
+      move.broughtValue === undefined
+        ? issueFromPool(before, quantity)
+        : takeBackFromPool(before, quantity, move.broughtValue);
     pools.set(key, pool);
-    return [{ reason, move: { ...base, binId, quantity: quantity.negated(), value } }];
+    return [{ reason, move: { ...base, ...reversing(move, 0), binId, quantity: quantity.negated(), value } }];
   }
 }
 
@@ -110,6 +127,11 @@ export function valueByComponent(moves: readonly PostedMove[]): Readonly<Record<
   const sum = (component: StockComponent): MinorAmount =>
     minorAmount(Math.abs(moves.reduce((total, move) => total + (move.component === component ? move.value : 0), 0)));
   return { materials: sum('materials'), units: sum('units') };
+}
+
+function reversing(move: NewMove, index: number): { readonly reverses?: number } {
+  const reverses = move.reverses?.[index];
+  return reverses === undefined ? {} : { reverses };
 }
 
 function partOf(parts: ReadonlyMap<number, LockedPart>, partId: number): LockedPart {
@@ -136,6 +158,7 @@ function moveRow(document: RecordedDocument, move: PostedMove, reason: string, e
     reason,
     occurredAt: document.occurredAt,
     recordedBy: document.recordedBy,
+    reverses: move.reverses ?? null,
   };
 }
 

@@ -25,6 +25,8 @@ interface Move {
   /** Above zero, in the part's stock unit. The direction is the move's own. */
   readonly quantity: Decimal;
   readonly reason: MoveReason;
+  /** The move that this one takes back; of a change of bin, the one that came and the one that left. */
+  readonly reverses?: readonly number[];
 }
 
 /** Comes onto the shelf with a value of its own. */
@@ -36,6 +38,8 @@ export interface MoveIn extends Move {
 /** Leaves the shelf at what its cost pool says. */
 export interface MoveOut extends Move {
   readonly direction: 'out';
+  /** What it once came with, to be taken back at that as far as the pool can bear it. */
+  readonly broughtValue?: MinorAmount;
 }
 
 /** Changes its bin and nothing else. */
@@ -58,4 +62,5 @@ export interface PostedMove {
   /** Signed like the quantity; zero for a change of bin. */
   readonly value: MinorAmount;
   readonly component: StockComponent;
+  readonly reverses?: number;
 }

@@ -11,5 +11,12 @@ export const stockConstraints: ConstraintTable = {
   },
   stock_move_lot_of_part: { code: 'rule_broken', sentence: 'This lot is of another part.' },
   stock_move_reversed_once: { code: 'wrong_state', sentence: 'This has been reversed already.' },
+  document_reversed_once: { code: 'wrong_state', sentence: 'This document has been reversed already.' },
+  lot_code_unique: { code: 'already_exists', sentence: 'Another lot has this code already.' },
+  bin_code_unique: {
+    code: 'already_exists',
+    sentence: 'Another bin has this code already. Choose another, or open that bin.',
+    pointer: '/code',
+  },
   reservation_one_per_unit: { code: 'wrong_state', sentence: 'This unit is promised to somebody already.' },
 };

@@ -84,8 +84,8 @@ export class SuppliersService {
       subjectKind: 'supplier',
       subjectId: after.id,
       subjectCode: after.code,
-      ...(before && { before: { ...before } }),
-      after: { ...after },
+      ...(before && { before }),
+      after,
     });
   }
 }

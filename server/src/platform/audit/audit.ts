@@ -15,8 +15,8 @@ export interface AuditRecord {
   /** The code on the subject's tag, or the name people know it by. */
   readonly subjectCode?: string | null;
   /** The values that changed, before and after; never a secret. */
-  readonly before?: Readonly<Record<string, unknown>>;
-  readonly after?: Readonly<Record<string, unknown>>;
+  readonly before?: object;
+  readonly after?: object;
   readonly requestId?: string;
 }
 
@@ -47,6 +47,6 @@ export class Audit {
 }
 
 /** Dates become ISO strings and the like, as they would on the wire. */
-function asJson(values: Readonly<Record<string, unknown>> | undefined): JsonValue | null {
+function asJson(values: object | undefined): JsonValue | null {
   return values === undefined ? null : (JSON.parse(JSON.stringify(values)) as JsonValue);
 }

@@ -13,14 +13,24 @@ export class Numbers {
    * @param period the year in which the numbers begin again at 1, or an empty text for a series that never does
    */
   async next(trx: Transaction<DB>, series: string, period: string): Promise<number> {
+    return this.nextOf(trx, series, period, 1);
+  }
+
+  /**
+   * Takes several numbers that follow each other.
+   *
+   * @param count how many, at least one
+   * @returns the first of them
+   */
+  async nextOf(trx: Transaction<DB>, series: string, period: string, count: number): Promise<number> {
     const row = await trx
       .insertInto('number_series')
-      .values({ series, period, last_number: 1 })
+      .values({ series, period, last_number: count })
       .onConflict((conflict) =>
-        conflict.columns(['series', 'period']).doUpdateSet({ last_number: sql`number_series.last_number + 1` }),
+        conflict.columns(['series', 'period']).doUpdateSet({ last_number: sql`number_series.last_number + ${count}` }),
       )
       .returning('last_number')
       .executeTakeFirstOrThrow();
-    return row.last_number;
+    return row.last_number - count + 1;
   }
 }
