@@ -1,4 +1,4 @@
-import { negateMinor, sumMinor, zeroAmount, type MinorAmount } from '../money/minor-units.js';
+import { negateMinor, sumMinor, type MinorAmount } from '../money/minor-units.js';
 import { Decimal, decimal, type DecimalInput } from '../measure/decimal.js';
 import { emptyPool, issueFromPool, receiveIntoPool, type CostPool } from '../money/movement-value.js';
 import { addLayer, issueFifo, layersValue, type CostLayer } from './fifo.js';
@@ -48,18 +48,33 @@ export function movingAverageValuation(events: readonly StockEvent[]): StockValu
  */
 export function fifoValuation(events: readonly StockEvent[]): StockValuation {
   const perIssue: MinorAmount[] = [];
-  let layers: readonly CostLayer[] = [];
+  // Layers before `first` are used up: an issue touches only those it needs, so a long history stays linear.
+  const open: CostLayer[] = [];
+  let first = 0;
   events.forEach((event, order) => {
     if (event.kind === 'in') {
-      const receipt = { id: String(order), order, quantity: decimal(event.quantity), value: event.value };
-      layers = addLayer(layers, receipt);
+      open.push(...addLayer([], { id: String(order), order, quantity: decimal(event.quantity), value: event.value }));
       return;
     }
-    const issue = issueFifo(layers, event.quantity);
+    const needed = open.slice(first, first + layersNeeded(open, first, decimal(event.quantity)));
+    const issue = issueFifo(needed, event.quantity);
     perIssue.push(negateMinor(issue.value));
-    layers = issue.layers;
+    first += needed.length - issue.layers.length;
+    issue.layers.forEach((layer, index) => {
+      open[first + index] = layer;
+    });
   });
+  const layers = open.slice(first);
   const quantity = layers.reduce((sum, layer) => sum.plus(layer.quantity), new Decimal(0));
-  const value = layers.length === 0 ? zeroAmount : layersValue(layers);
-  return { perIssue, costOfIssues: sumMinor(perIssue), closing: { quantity, value } };
+  return { perIssue, costOfIssues: sumMinor(perIssue), closing: { quantity, value: layersValue(layers) } };
+}
+
+function layersNeeded(layers: readonly CostLayer[], first: number, quantity: Decimal): number {
+  let count = 0;
+  let open = quantity;
+  while (open.greaterThan(0) && first + count < layers.length) {
+    open = open.minus(layers[first + count]?.quantity ?? 0);
+    count += 1;
+  }
+  return count;
 }

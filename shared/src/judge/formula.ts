@@ -1,4 +1,4 @@
-import type { MathNode, Unit as MathUnit } from 'mathjs';
+import type { EvalFunction, Unit as MathUnit } from 'mathjs';
 import { ArithmeticError, attempt } from '../errors/arithmetic-error.js';
 import { Decimal, decimal, type DecimalInput } from '../measure/decimal.js';
 import type { Dimension } from '../measure/dimension.js';
@@ -14,6 +14,10 @@ export interface Formula {
   readonly readings: ReadonlyMap<string, Unit>;
   /** Unit of the result. */
   readonly unit: Unit;
+  /** Names in the text: readings, units, pi. */
+  readonly names: readonly string[];
+  /** The library's compiled form. */
+  readonly compiled: EvalFunction;
 }
 
 /** Coherent units under the names of the library; what has no dimension is a plain number there. */
@@ -56,10 +60,13 @@ const coherent: Readonly<Record<Dimension, string | undefined>> = {
  *   `judge_formula_unknown_name`, `judge_formula_units`, `measure_unknown_unit`
  */
 export function readFormula(text: string, readings: Readonly<Record<string, string>>, unit: string): Formula {
+  const node = checkFormula(text);
   const formula: Formula = {
     text,
     readings: new Map(Object.entries(readings).map(([name, code]) => [name, unitOf(code)])),
     unit: unitOf(unit),
+    names: namesIn(node),
+    compiled: node.compile(),
   };
   // Odd values, so that no difference is zero by chance; only the units matter in this trial.
   const trial = [...formula.readings.keys()].map((name, index) => [name, new Decimal(index + 2).sqrt()] as const);
@@ -77,11 +84,10 @@ export function readFormula(text: string, readings: Readonly<Record<string, stri
  * @throws ArithmeticError `judge_formula_missing_reading`, `judge_formula_no_result`; as {@link readFormula}
  */
 export function evaluateFormula(formula: Formula, values: Readonly<Record<string, DecimalInput>>): Decimal {
-  const node = checkFormula(formula.text);
   // The natural logarithm, which the library calls log.
   const scope = new Map<string, unknown>([['ln', (value: number) => math.log(value)]]);
-  for (const name of namesIn(node)) scope.set(name, valueOfName(name, formula, values));
-  const result = numberInUnit(evaluated(node, scope, formula), formula);
+  for (const name of formula.names) scope.set(name, valueOfName(name, formula, values));
+  const result = numberInUnit(evaluated(formula, scope), formula);
   if (!Number.isFinite(result)) throw new ArithmeticError('judge_formula_no_result');
   const base = new Decimal(result);
   const target = formula.unit;
@@ -108,9 +114,9 @@ function inCoherentUnit(value: Decimal, unit: Unit): number | MathUnit {
   return name === undefined ? base : math.unit(base, name);
 }
 
-function evaluated(node: MathNode, scope: Map<string, unknown>, formula: Formula): unknown {
+function evaluated(formula: Formula, scope: Map<string, unknown>): unknown {
   try {
-    return node.evaluate(scope) as unknown;
+    return formula.compiled.evaluate(scope) as unknown;
   } catch (error) {
     // The library throws on units that do not add up, and on nothing else that the grammar lets through.
     if (error instanceof Error) throw new ArithmeticError('judge_formula_units', { unit: formula.unit.code });

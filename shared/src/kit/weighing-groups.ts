@@ -56,27 +56,43 @@ function firstFit<T extends GroupItem>(ordered: readonly T[]): readonly (readonl
 
 /** The first member has the least room, since items come in that order. */
 function fits(group: readonly GroupItem[], item: GroupItem): boolean {
-  return group.reduce((sum, member) => sum + member.size, item.size) <= (group[0]?.room ?? item.room);
+  return totalSize(group) + item.size <= (group[0]?.room ?? item.room);
+}
+
+function totalSize(items: readonly GroupItem[]): number {
+  return items.reduce((sum, { size }) => sum + size, 0);
 }
 
 /** Depth-first search over all groupings that can still beat the best one known. */
 class GroupSearch<T extends GroupItem> {
   private steps = 0;
+  /** Total size of the items from each place on. */
+  private readonly sizeFrom: readonly number[];
 
   constructor(
     private readonly ordered: readonly T[],
     private best: readonly (readonly T[])[],
     private readonly bound: number,
-  ) {}
+  ) {
+    this.sizeFrom = ordered.map((_item, index) => totalSize(ordered.slice(index)));
+  }
 
   run(): Grouping<T> {
     this.place(0, []);
     return { groups: this.best, proven: this.steps < mostSteps || this.best.length <= this.bound };
   }
 
+  /** Whether what is still to be placed could go into these groups and as many new ones as still beat the best. */
+  private couldFit(index: number, groups: readonly (readonly T[])[]): boolean {
+    const free = groups.reduce((sum, group) => sum + (group[0]?.room ?? 0) - totalSize(group), 0);
+    const more = this.best.length - 1 - groups.length;
+    const roomiest = this.ordered.at(-1)?.room ?? 0;
+    return (this.sizeFrom[index] ?? 0) * (1 - 1e-9) <= free + more * roomiest;
+  }
+
   private place(index: number, groups: T[][]): void {
     if (this.best.length <= this.bound || groups.length >= this.best.length) return;
-    if (this.steps >= mostSteps) return;
+    if (this.steps >= mostSteps || !this.couldFit(index, groups)) return;
     this.steps += 1;
     const item = this.ordered[index];
     if (!item) {
@@ -86,7 +102,7 @@ class GroupSearch<T extends GroupItem> {
     const seen = new Set<string>();
     for (const group of groups) {
       // Groups alike in size and room lead to the same.
-      const likeness = `${group[0]?.room} ${group.reduce((sum, member) => sum + member.size, 0)}`;
+      const likeness = `${group[0]?.room} ${totalSize(group)}`;
       if (seen.has(likeness) || !fits(group, item)) continue;
       seen.add(likeness);
       group.push(item);
