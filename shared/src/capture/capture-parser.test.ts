@@ -310,6 +310,46 @@ describe('figures', () => {
   });
 });
 
+describe('whatever is brought', () => {
+  const scrap = fc.constantFrom(
+    ',',
+    ';',
+    '\t',
+    ' ',
+    '\n',
+    '\r\n',
+    '"',
+    '1',
+    '-2.5',
+    '3e4',
+    '1,5',
+    'V',
+    'time (s)',
+    'nan',
+    '0',
+    '\u00b5',
+  );
+
+  test('is read or refused by a fault of ours, never otherwise', () => {
+    const outcomes = new Set<string>();
+    fc.assert(
+      fc.property(fc.array(scrap, { maxLength: 200 }), (parts) => {
+        outcomes.add(codeOf(() => read(parts.join(''))));
+      }),
+      { numRuns: 3000, seed: 5 },
+    );
+    fc.assert(
+      fc.property(fc.uint8Array({ maxLength: 300 }), (bytes) => {
+        outcomes.add(codeOf(() => readAll([bytes])));
+      }),
+      { numRuns: 1000, seed: 6 },
+    );
+    expect(outcomes).toContain('no fault');
+    expect(outcomes).toContain('capture_no_numbers');
+    expect(outcomes).toContain('capture_binary');
+  });
+});
+
 test('text survives its way through bytes', () => {
   fc.assert(
     fc.property(fc.string({ unit: 'grapheme', maxLength: 40 }), (text) => {

@@ -13,6 +13,9 @@ export interface ChannelMeasures {
   /** Leading and trailing transition of a pulse, 10 to 90 percent; for positive pulses rise and fall. */
   readonly leadingDuration: Measure;
   readonly trailingDuration: Measure;
+  /** How far the extremes lie beyond the levels, as shares of the amplitude; seen where the levels were found. */
+  readonly overshoot: Measure;
+  readonly undershoot: Measure;
   readonly leadingEdges: number;
   readonly completePeriods: number;
   readonly completePulses: number;
@@ -53,6 +56,22 @@ class EdgeTally {
     if (this.samples.mean < fewestPerEdge) return refuse('few_samples_per_edge');
     return this.seconds.asMeasure(interval / Math.sqrt(this.seconds.count));
   }
+}
+
+/** Overshoot and undershoot as shares of the amplitude. IEEE Std 181-2011, 5.3.4; from memory. */
+function excursions({
+  low,
+  high,
+  least,
+  greatest,
+  clipped,
+}: StateLevels): Pick<ChannelMeasures, 'overshoot' | 'undershoot'> {
+  if (clipped) return { overshoot: refuse('clipped'), undershoot: refuse('clipped') };
+  const share = (beyond: number): Measure => {
+    const value = Math.max(0, beyond / (high - low));
+    return { measured: true, value, least: value, greatest: value, count: 1, uncertainty: 0 };
+  };
+  return { overshoot: share(greatest - high), undershoot: share(low - least) };
 }
 
 /** Gathers the transitions of one channel into its measures; only complete periods and pulses count. */
@@ -161,6 +180,7 @@ export class ChannelTally implements EdgeSink {
         : enough && duties.count > 0
           ? duties.asMeasure(interval / this.meanPeriod)
           : refuse('few_cycles'),
+      ...excursions(levels),
       leadingDuration: this.leadingDurations.measure(clipped, interval, this.leadingEdges),
       trailingDuration: this.trailingDurations.measure(clipped, interval, widths.count),
     };
@@ -183,6 +203,8 @@ export function refuseAll(reason: Parameters<typeof refuse>[0]): ChannelMeasures
     duty: refused,
     leadingDuration: refused,
     trailingDuration: refused,
+    overshoot: refused,
+    undershoot: refused,
     leadingEdges: 0,
     completePeriods: 0,
     completePulses: 0,

@@ -40,7 +40,7 @@ const isPlain = (column: LayoutColumn): boolean =>
  */
 export class RowReader {
   private readonly blocks: readonly Float64Array[];
-  private readonly slots: Int8Array;
+  private readonly slots: Int16Array;
   private readonly columns: readonly (LayoutColumn | undefined)[];
   private readonly delimiter: number;
   private readonly mark: number;
@@ -60,7 +60,7 @@ export class RowReader {
     this.columns = [timeColumn, ...layout.channels];
     this.blocks = this.columns.map(() => new Float64Array(blockRows));
     const last = this.columns.reduce((most, column) => Math.max(most, column?.index ?? 0), 0);
-    this.slots = new Int8Array(last + 1).fill(-1);
+    this.slots = new Int16Array(last + 1).fill(-1);
     this.columns.forEach((column, slot) => {
       if (column !== undefined) this.slots[column.index] = slot;
     });

@@ -179,6 +179,16 @@ describe('measures', () => {
     expect(valueOf(negative?.trailingDuration)).toBeCloseTo(valueOf(upright?.trailingDuration), 12);
   });
 
+  test('say how far a spike goes beyond the levels', () => {
+    const [times, values] = sample((seconds) => trapezoidAt(drive, seconds), 2e7, 8000);
+    const spiked = values.map((value, index) => (index % 400 === 90 ? 12.5 : index % 400 === 20 ? -0.5 : value));
+    const [channel] = analyse([times, spiked]).channels;
+    expect(valueOf(channel?.overshoot)).toBeCloseTo(0.25, 9);
+    expect(valueOf(channel?.undershoot)).toBeCloseTo(0.05, 9);
+    const [plain] = analyse([times, values]).channels;
+    expect(valueOf(plain?.overshoot)).toBeCloseTo(0, 9);
+  });
+
   test('pass over gaps', () => {
     const [times, values] = sample((seconds) => trapezoidAt(drive, seconds), 2e7, 8000);
     const gappy = values.map((value, index) => (index % 97 === 0 ? Number.NaN : value));

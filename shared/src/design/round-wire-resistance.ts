@@ -1,4 +1,5 @@
-import { type ConductorMaterial, resistivityAt } from '../measure/conductor-material.js';
+import type { ConductorMaterial } from '../measure/conductor-material.js';
+import { ohmsPerMetre } from '../measure/wire.js';
 import { type DesignFigure, type DesignMethod, requireNotNegative, requirePositive, warn } from './design-figure.js';
 import { materialWarnings, skinDepth } from './skin-depth.js';
 
@@ -53,6 +54,14 @@ export function skinEffectRatio(radiusOverSkin: number): number {
   return 1 - (square * imaginary) / size / 2;
 }
 
+/**
+ * A diameter as the wire measures take it: text in plain notation, to a billionth of a micrometre.
+ *
+ * @param millimetres positive
+ * @returns for example "0.5"
+ */
+export const diameterText = (millimetres: number): string => millimetres.toFixed(12);
+
 function checkWire(wire: RoundWire): void {
   requirePositive('length', wire.lengthMillimetres);
   requirePositive('diameter', wire.diameterMillimetres);
@@ -68,9 +77,10 @@ function checkWire(wire: RoundWire): void {
  */
 export function directResistance(wire: RoundWire): DesignFigure {
   checkWire(wire);
-  const area = (Math.PI * wire.diameterMillimetres ** 2) / 4;
+  const { material, celsius } = wire;
+  const one = { material, diameterMillimetres: diameterText(wire.diameterMillimetres), strands: 1 };
   return {
-    value: (resistivityAt(wire.material, wire.celsius) * wire.lengthMillimetres * 1e-3) / area,
+    value: ohmsPerMetre(one, celsius) * wire.lengthMillimetres * 1e-3,
     unit: 'Ω',
     method: directMethod,
     warnings: materialWarnings(wire.material, wire.celsius, 0),

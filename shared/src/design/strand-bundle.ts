@@ -1,5 +1,7 @@
 import { copper } from '../measure/conductor-material.js';
+import { addedDiameters, crossSection, equalSingleDiameter } from '../measure/wire.js';
 import { type DesignFigure, type DesignMethod, requirePositive, requireWhole, warn } from './design-figure.js';
+import { diameterText } from './round-wire-resistance.js';
 import { skinDepth } from './skin-depth.js';
 
 export interface StrandBundle {
@@ -47,14 +49,15 @@ export function strandBundle(strands: number, strandMillimetres: number, hertz: 
   requireWhole('number of strands', strands);
   requirePositive('strand diameter', strandMillimetres);
   const skin = skinDepth(copper, hertz, celsius);
+  const wire = { material: copper, diameterMillimetres: diameterText(strandMillimetres), strands };
   const warnings = [
     ...(strandMillimetres > 2 * skin.value ? [warn('strand_too_thick', { twice: (2 * skin.value).toFixed(2) })] : []),
     warn('proximity_ignored'),
   ];
   return {
-    area: { value: (strands * Math.PI * strandMillimetres ** 2) / 4, unit: 'mm²', method: areaMethod, warnings },
-    equalWire: { value: strandMillimetres * Math.sqrt(strands), unit: 'mm', method: equalMethod, warnings },
-    addedDiameters: { value: strands * strandMillimetres, unit: 'mm', method: addedMethod, warnings },
+    area: { value: crossSection(wire).toNumber(), unit: 'mm²', method: areaMethod, warnings },
+    equalWire: { value: equalSingleDiameter(wire).toNumber(), unit: 'mm', method: equalMethod, warnings },
+    addedDiameters: { value: addedDiameters(wire).toNumber(), unit: 'mm', method: addedMethod, warnings },
     skin,
   };
 }
