@@ -907,7 +907,7 @@ CREATE TABLE public.idempotency_key (
     request_hash bytea NOT NULL,
     claimed_at timestamp with time zone NOT NULL,
     status smallint,
-    answer jsonb,
+    answer json,
     answered_at timestamp with time zone,
     CONSTRAINT idempotency_key_answer_whole CHECK (((status IS NULL) = (answered_at IS NULL))),
     CONSTRAINT idempotency_key_key_check CHECK (((length(key) >= 8) AND (length(key) <= 200))),
@@ -918,6 +918,8 @@ CREATE TABLE public.idempotency_key (
 COMMENT ON TABLE public.idempotency_key IS 'A creating request that took effect, with the answer it got, so that sending it again creates nothing and gets the same answer.';
 
 COMMENT ON COLUMN public.idempotency_key.scope IS 'Who sent it: a person, or a visitor''s session.';
+
+COMMENT ON COLUMN public.idempotency_key.answer IS 'As text, so that the repeated answer has the same bytes.';
 
 CREATE TABLE public.import_run (
     id bigint NOT NULL,

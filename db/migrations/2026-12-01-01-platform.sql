@@ -84,12 +84,13 @@ create table idempotency_key (
   request_hash bytea not null check (length(request_hash) = 32),
   claimed_at timestamptz not null,
   status smallint check (status between 200 and 599),
-  answer jsonb,
+  answer json,
   answered_at timestamptz,
   primary key (scope, key),
   constraint idempotency_key_answer_whole check ((status is null) = (answered_at is null))
 );
 comment on table idempotency_key is 'A creating request that took effect, with the answer it got, so that sending it again creates nothing and gets the same answer.';
+comment on column idempotency_key.answer is 'As text, so that the repeated answer has the same bytes.';
 comment on column idempotency_key.scope is 'Who sent it: a person, or a visitor''s session.';
 create index idempotency_key_claimed_at on idempotency_key (claimed_at);
 

@@ -301,6 +301,9 @@ export interface FileObject {
 }
 
 export interface IdempotencyKey {
+  /**
+   * As text, so that the repeated answer has the same bytes.
+   */
   answer: Json | null;
   answered_at: Timestamp | null;
   claimed_at: Timestamp;

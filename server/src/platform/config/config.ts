@@ -135,7 +135,11 @@ function readTrustProxy(env: Environment): Config['trustProxy'] {
   if (text === '' || text === '0' || text === 'false') return false;
   if (/^[1-9]$/.test(text)) return Number(text);
   const subnets = text.split(',').map((part) => part.trim());
-  if (subnets.every((subnet) => /^(loopback|linklocal|uniquelocal|[\da-fA-F.:]+(\/\d{1,3})?)$/.test(subnet))) {
+  if (
+    subnets.every((subnet) =>
+      /^(loopback|linklocal|uniquelocal|[\da-fA-F]*[.:][\da-fA-F.:]+(\/\d{1,3})?)$/.test(subnet),
+    )
+  ) {
     return subnets;
   }
   env.fault('TRUST_PROXY', 'is the number of proxies in front of the server, or their subnets with commas between');

@@ -29,8 +29,10 @@ export class ProblemFilter implements ExceptionFilter {
   constructor(private readonly constraints: ConstraintSentences) {}
 
   catch(error: unknown, host: ArgumentsHost): void {
-    const request = host.switchToHttp().getRequest<Request>();
-    const response = host.switchToHttp().getResponse<Response>();
+    this.answer(error, host.switchToHttp().getRequest<Request>(), host.switchToHttp().getResponse<Response>());
+  }
+
+  answer(error: unknown, request: Request, response: Response): void {
     const refusal = this.refusalOf(error);
     if (refusal.status >= 500) this.#logger.error({ requestId: request.id, err: error });
     // Once the first bytes of a file are out, all that is left is to break the connection, so that nobody takes the

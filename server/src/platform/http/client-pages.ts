@@ -1,6 +1,7 @@
 import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import express, { type NextFunction, type Request, type RequestHandler, type Response } from 'express';
+import { notFound } from '../errors/app-error.js';
 import { nonceOf } from './headers.js';
 
 /** What Vite writes where the page's nonce belongs (`html.cspNonce` in its configuration). */
@@ -31,6 +32,11 @@ export function clientPages(folder: string): RequestHandler[] {
       response.type('html').send(page.replaceAll(noncePlaceholder, nonceOf(response)));
     },
   ];
+}
+
+/** What is neither a file nor a page of ours. */
+export function noSuchPage(): RequestHandler {
+  return (_request, _response, next) => next(notFound('page'));
 }
 
 /** Leaves the API's own addresses to Nest, whatever their spelling. */

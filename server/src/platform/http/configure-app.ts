@@ -1,5 +1,6 @@
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import compression from 'compression';
+import type { ErrorRequestHandler, NextFunction, Request, RequestHandler, Response } from 'express';
 import type { Logger } from 'pino';
 import { sessionMiddleware } from '../auth/session.middleware.js';
 import { SessionStore } from '../auth/session.store.js';
@@ -11,7 +12,7 @@ import { ProblemFilter } from '../errors/problem.filter.js';
 import { appLogger, requestLog } from '../logging/logger.js';
 import { createValidationPipe } from '../validation/validation-pipe.js';
 import { refuseOddShapes, requireJsonOrFiles } from './body-shape.js';
-import { clientPages, outsideApi } from './client-pages.js';
+import { clientPages, noSuchPage, outsideApi } from './client-pages.js';
 import { privateAnswers, securityHeaders } from './headers.js';
 
 /** The largest body of a request without files. */
@@ -28,22 +29,37 @@ export function configureApp(app: NestExpressApplication): void {
   app.set('query parser', 'simple');
   app.set('etag', false);
   app.disable('x-powered-by');
-  app.useGlobalFilters(new ProblemFilter(app.get(ConstraintSentences)));
+  const filter = new ProblemFilter(app.get(ConstraintSentences));
+  app.useGlobalFilters(filter);
   app.useGlobalPipes(createValidationPipe());
   app.use(requestLog(app.get<Logger>(appLogger)));
   app.use(...securityHeaders(config));
   app.use(compression());
-  for (const handler of outsideApi(clientPages(config.clientFolder))) app.use(handler);
+  app.use(...outsideApi([...clientPages(config.clientFolder), noSuchPage()]));
   app.use(privateAnswers(), requireJsonOrFiles());
-  app.use(
-    '/api',
-    ...sessionMiddleware({
-      config,
-      clock: app.get(Clock),
-      store: app.get(SessionStore),
-      users: app.get(UsersReader),
-    }),
-  );
+  const session = sessionMiddleware({
+    config,
+    clock: app.get(Clock),
+    store: app.get(SessionStore),
+    users: app.get(UsersReader),
+  });
+  app.use(...exceptHealth(session));
   app.useBodyParser('json', { limit: largestJsonBody });
   app.use(refuseOddShapes());
+  app.use(answerFaults(filter));
+}
+
+/** Health is asked after when sessions cannot be read, too. */
+function exceptHealth(handlers: readonly RequestHandler[]): RequestHandler[] {
+  return handlers.map((handler) => (request, response, next) => {
+    if (/^\/api\/health(\/|$)/i.test(request.path)) return next();
+    return handler(request, response, next);
+  });
+}
+
+/** Faults of the handlers above, which come before Nest, are answered as its own are. */
+function answerFaults(filter: ProblemFilter): ErrorRequestHandler {
+  return (error: unknown, request: Request, response: Response, _next: NextFunction) => {
+    filter.answer(error, request, response);
+  };
 }

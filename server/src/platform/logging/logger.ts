@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import type { LoggerService } from '@nestjs/common';
-import { pino, type Logger } from 'pino';
+import { type DestinationStream, type Logger, pino } from 'pino';
 import { pinoHttp } from 'pino-http';
 import type { Request, RequestHandler } from 'express';
 
@@ -8,8 +8,8 @@ import type { Request, RequestHandler } from 'express';
 export const appLogger = Symbol('appLogger');
 
 /** One JSON object a line, instants in UTC. What must never be read in a log is never handed to it. */
-export function createLogger(level: string): Logger {
-  return pino({ level, timestamp: pino.stdTimeFunctions.isoTime, base: undefined });
+export function createLogger(level: string, destination?: DestinationStream): Logger {
+  return pino({ level, timestamp: pino.stdTimeFunctions.isoTime, base: undefined }, destination);
 }
 
 /** Nest names each module and route while it puts the application together. */

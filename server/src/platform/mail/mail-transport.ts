@@ -1,6 +1,6 @@
 import { Injectable, type OnApplicationShutdown } from '@nestjs/common';
 import nodemailer, { type Transporter } from 'nodemailer';
-import type { Readable } from 'node:stream';
+import { PassThrough, type Readable } from 'node:stream';
 import { Config } from '../config/config.js';
 
 export interface MailMessage {
@@ -26,6 +26,7 @@ export type MailOutcome =
 @Injectable()
 export class MailTransport implements OnApplicationShutdown {
   readonly #transporter: Transporter;
+  readonly #handedOver = new Set<string>();
 
   constructor(private readonly config: Config) {
     const url = new URL(config.smtpUrl);
@@ -33,6 +34,7 @@ export class MailTransport implements OnApplicationShutdown {
     url.searchParams.set('greetingTimeout', '10000');
     url.searchParams.set('socketTimeout', '30000');
     this.#transporter = nodemailer.createTransport(url.href);
+    this.#noteWhenHandedOver();
   }
 
   async send(message: MailMessage): Promise<MailOutcome> {
@@ -51,21 +53,34 @@ export class MailTransport implements OnApplicationShutdown {
       });
       return { kind: 'sent' };
     } catch (error) {
-      return outcomeOf(error);
+      return outcomeOf(error, this.#handedOver.has(message.messageId));
+    } finally {
+      this.#handedOver.delete(message.messageId);
     }
   }
 
   onApplicationShutdown(): void {
     this.#transporter.close();
   }
+
+  /** The library says of a broken line not whether the mail had gone through it; its last byte leaving us tells. */
+  #noteWhenHandedOver(): void {
+    this.#transporter.use('stream', (mail, done) => {
+      mail.message.transform(() =>
+        new PassThrough().once('finish', () => this.#handedOver.add(mail.message.messageId())),
+      );
+      done();
+    });
+  }
 }
 
-/** A reply of the mail server settles it: 4xx is for now, 5xx for good (RFC 5321, 4.2.1). */
-export function outcomeOf(error: unknown): MailOutcome {
+/**
+ * A reply of the mail server settles it: 4xx is for now, 5xx for good (RFC 5321, 4.2.1). Without a reply, a mail whose
+ * last byte had left may have arrived.
+ */
+export function outcomeOf(error: unknown, handedOver: boolean): MailOutcome {
   const reason = error instanceof Error ? error.message.slice(0, 500) : String(error);
-  const details = error as { responseCode?: unknown; command?: unknown };
-  if (typeof details.responseCode === 'number') {
-    return { kind: details.responseCode >= 500 ? 'refused' : 'later', reason };
-  }
-  return { kind: details.command === 'DATA' ? 'uncertain' : 'later', reason };
+  const { responseCode } = error as { responseCode?: unknown };
+  if (typeof responseCode === 'number') return { kind: responseCode >= 500 ? 'refused' : 'later', reason };
+  return { kind: handedOver ? 'uncertain' : 'later', reason };
 }
