@@ -8,6 +8,9 @@ const fromNode = [
   'Request',
   'Response',
   'Headers',
+  // Node's Request takes no other kind of signal.
+  'AbortController',
+  'AbortSignal',
   'ReadableStream',
   'WritableStream',
   'TransformStream',

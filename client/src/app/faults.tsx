@@ -47,3 +47,12 @@ export function RouteFault(): ReactElement {
     </div>
   );
 }
+
+/** The same where no shell stands around it. */
+export function RootFault(): ReactElement {
+  return (
+    <main id="content">
+      <RouteFault />
+    </main>
+  );
+}

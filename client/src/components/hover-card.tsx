@@ -49,7 +49,7 @@ function placeUnder(element: Element): Place {
  * One line about a thing, shown while the pointer or the focus is on it; Escape puts it away.
  * It hangs from the page's body, since a table's cells would cut it off.
  */
-export function useHoverCard(story: string | undefined, onCopy: () => void) {
+export function useHoverCard(story: string | undefined, acts: { onCopy: () => void; onPrint: () => void }) {
   const id = useId();
   const leaving = useRef<ReturnType<typeof setTimeout> | undefined>(undefined);
   const [place, setPlace] = useState<Place>();
@@ -80,8 +80,11 @@ export function useHoverCard(story: string | undefined, onCopy: () => void) {
       <span role="tooltip" id={id}>
         {story}
       </span>
-      <button type="button" tabIndex={-1} title="Ctrl+C does the same" onClick={onCopy}>
+      <button type="button" tabIndex={-1} title="Ctrl+C does the same" onClick={acts.onCopy}>
         Copy
+      </button>
+      <button type="button" tabIndex={-1} onClick={acts.onPrint}>
+        Print
       </button>
     </Card>
   ) : null;

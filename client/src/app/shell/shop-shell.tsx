@@ -5,7 +5,7 @@ import { Link, NavLink, Outlet } from 'react-router-dom';
 import { sessionQuery } from '../../api/session';
 import { shopLinks } from '../../features/shop/links';
 import { isStaff } from '../areas';
-import { LightNotices } from './light-notices';
+import { Notices } from './notices';
 import { SkipLink } from './skip-link';
 
 const Top = styled('header')(({ theme }) => ({
@@ -61,7 +61,7 @@ export function Component(): ReactElement {
       <Content id="content" tabIndex={-1}>
         <Outlet />
       </Content>
-      <LightNotices />
+      <Notices />
     </>
   );
 }

@@ -23,6 +23,7 @@ export const surfaces: Components<Theme> = {
           scrollBehavior: 'auto !important',
         },
       },
+      '@media screen': { '[data-print-label]': { display: 'none' } },
       '@media print': {
         'body[data-printing="label"] > *:not([data-print-label])': { display: 'none !important' },
         body: { backgroundColor: '#fff !important' },

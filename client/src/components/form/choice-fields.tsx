@@ -9,7 +9,7 @@ import Select from '@mui/material/Select';
 import type { ReactElement, ReactNode } from 'react';
 import { useController } from 'react-hook-form';
 import { Field, type FieldProps } from './field';
-import { fieldId, useFieldName } from './field-names';
+import { useFieldId } from './field-names';
 
 export interface Choice {
   value: string;
@@ -78,10 +78,9 @@ interface CheckProps {
 }
 
 export function CheckInput({ name, label, hint, mustBeTicked }: CheckProps): ReactElement {
-  useFieldName(name);
+  const id = useFieldId(name);
   const validate = (value: unknown): string | true => (mustBeTicked && value !== true ? mustBeTicked : true);
   const { field, fieldState } = useController({ name, rules: { validate } });
-  const id = fieldId(name);
   const fault = fieldState.error?.message;
   return (
     <FormControl error={Boolean(fault)}>
@@ -103,7 +102,12 @@ export function CheckInput({ name, label, hint, mustBeTicked }: CheckProps): Rea
           />
         }
       />
-      {fault || hint ? <FormHelperText id={`${id}-note`}>{fault ? `✕ ${fault}` : hint}</FormHelperText> : null}
+      {fault || hint ? (
+        <FormHelperText id={`${id}-note`}>
+          {fault ? <span aria-hidden="true">✕ </span> : null}
+          {fault ?? hint}
+        </FormHelperText>
+      ) : null}
     </FormControl>
   );
 }

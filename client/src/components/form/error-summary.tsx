@@ -1,8 +1,8 @@
 import { styled } from '@mui/material/styles';
-import { useEffect, useRef, type ReactElement } from 'react';
+import { use, useEffect, useRef, type ReactElement } from 'react';
 import { useFormState } from 'react-hook-form';
 import { capital, numberWord } from '../../lib/number-words';
-import { fieldId } from './field-names';
+import { fieldId, FormFieldsContext } from './field-names';
 import { faultsOf } from './server-faults';
 
 const Box = styled('div')(({ theme }) => ({
@@ -27,6 +27,7 @@ interface ErrorSummaryProps {
 /** All that keeps a form from being sent, in one place, with a way to each field. */
 export function ErrorSummary({ attempt, refusal }: ErrorSummaryProps): ReactElement | null {
   const { errors, submitCount } = useFormState();
+  const { prefix } = use(FormFieldsContext);
   const box = useRef<HTMLDivElement>(null);
   useEffect(() => {
     if (attempt > 0) box.current?.focus();
@@ -43,10 +44,10 @@ export function ErrorSummary({ attempt, refusal }: ErrorSummaryProps): ReactElem
         {faults.map(({ field, message }) => (
           <li key={field}>
             <a
-              href={`#${fieldId(field)}`}
+              href={`#${fieldId(prefix, field)}`}
               onClick={(event) => {
                 event.preventDefault();
-                document.getElementById(fieldId(field))?.focus();
+                document.getElementById(fieldId(prefix, field))?.focus();
               }}
             >
               {message}

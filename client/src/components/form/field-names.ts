@@ -1,19 +1,30 @@
 import { createContext, use, useEffect } from 'react';
 
-/** The fields a form really shows, so that a fault of any other stands in the summary. */
-export const FieldNames = createContext<Set<string>>(new Set());
+/** What a form knows of its fields: a page may hold two forms with fields of the same name. */
+export interface FormFields {
+  /** Begins the id of every field of this form. */
+  prefix: string;
+  /** The fields it really shows, so that a fault of any other stands in the summary. */
+  names: Set<string>;
+}
 
-export function useFieldName(name: string): void {
-  const names = use(FieldNames);
+export const FormFieldsContext = createContext<FormFields>({ prefix: 'field', names: new Set() });
+
+/**
+ * Makes a field known to its form.
+ * @returns the id of its control, for its label, its error and the summary's link
+ */
+export function useFieldId(name: string): string {
+  const { prefix, names } = use(FormFieldsContext);
   useEffect(() => {
     names.add(name);
     return () => {
       names.delete(name);
     };
   }, [names, name]);
+  return fieldId(prefix, name);
 }
 
-/** The id of a field's control, for its label, its error and the summary's link. */
-export function fieldId(name: string): string {
-  return `field-${name.replaceAll('.', '-')}`;
+export function fieldId(prefix: string, name: string): string {
+  return `${prefix}-${name.replaceAll('.', '-')}`;
 }

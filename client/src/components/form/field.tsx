@@ -3,7 +3,7 @@ import FormHelperText from '@mui/material/FormHelperText';
 import FormLabel from '@mui/material/FormLabel';
 import type { ReactElement, ReactNode } from 'react';
 import { useController, type ControllerRenderProps, type RegisterOptions } from 'react-hook-form';
-import { fieldId, useFieldName } from './field-names';
+import { useFieldId } from './field-names';
 
 export interface FieldProps {
   /** The name in the form's values, and in the JSON that is sent. */
@@ -30,10 +30,9 @@ interface FieldFrameProps extends FieldProps {
 
 /** Label above, control, then the error or the hint; every field of the product is drawn by this. */
 export function Field({ name, label, hint, required, rules, disabled, render, width }: FieldFrameProps): ReactElement {
-  useFieldName(name);
+  const id = useFieldId(name);
   const needed = typeof required === 'string' ? required : `${label} is needed.`;
   const { field, fieldState } = useController({ name, rules: { ...rules, required: required ? needed : undefined } });
-  const id = fieldId(name);
   const fault = fieldState.error?.message;
   const noteId = `${id}-note`;
   return (

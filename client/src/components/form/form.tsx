@@ -1,10 +1,10 @@
 import Button from '@mui/material/Button';
 import { styled } from '@mui/material/styles';
-import { useState, type FormEvent, type ReactElement, type ReactNode } from 'react';
+import { useId, useState, type FormEvent, type ReactElement, type ReactNode } from 'react';
 import { FormProvider, type FieldValues } from 'react-hook-form';
 import { ApiProblem, sentenceOf } from '../../lib/problem';
 import { ErrorSummary } from './error-summary';
-import { FieldNames } from './field-names';
+import { FormFieldsContext } from './field-names';
 import { placeFaults } from './server-faults';
 import type { DraftForm } from './use-draft-form';
 
@@ -42,7 +42,8 @@ export function Form<Values extends FieldValues>({
   label,
   after = 'kept',
 }: FormProps<Values>): ReactElement {
-  const names = useState(() => new Set<string>())[0];
+  const prefix = useId();
+  const [fields] = useState(() => ({ prefix, names: new Set<string>() }));
   const [refusal, setRefusal] = useState<readonly string[]>([]);
   const [attempt, setAttempt] = useState(0);
   const { isSubmitting } = form.formState;
@@ -58,7 +59,7 @@ export function Form<Values extends FieldValues>({
   };
   const refusalOf = (error: unknown): readonly string[] => {
     if (!(error instanceof ApiProblem) || error.errors.length === 0) return [sentenceOf(error).sentence];
-    const homeless = placeFaults(form, error, names);
+    const homeless = placeFaults(form, error, fields.names);
     return homeless.length > 0 ? homeless.map((fault) => fault.detail) : [];
   };
   const submit = (event: FormEvent): void => {
@@ -75,7 +76,7 @@ export function Form<Values extends FieldValues>({
   };
   return (
     <FormProvider {...form}>
-      <FieldNames value={names}>
+      <FormFieldsContext value={fields}>
         <Frame noValidate aria-label={label} onSubmit={submit}>
           <ErrorSummary attempt={attempt} refusal={refusal} />
           {form.restored && form.formState.isDirty ? (
@@ -104,7 +105,7 @@ export function Form<Values extends FieldValues>({
             ) : null}
           </div>
         </Frame>
-      </FieldNames>
+      </FormFieldsContext>
     </FormProvider>
   );
 }

@@ -3,6 +3,7 @@ import type { KeyboardEvent, ReactElement } from 'react';
 import { Link } from 'react-router-dom';
 import { useHoverCard } from '../hover-card';
 import { copyText } from './copy-text';
+import { openPrint } from './open-print';
 import { VisuallyHidden } from '../visually-hidden';
 import { hasOutline, tagAddress, tagEdges, tagWords, type TagKind } from './tag-kinds';
 
@@ -87,7 +88,10 @@ function Drawing({ kind, code }: Pick<TagProps, 'kind' | 'code'>): ReactElement 
 
 /** The small tag by which every part, lot, unit, batch, order and invoice is shown, everywhere the same. */
 export function Tag({ kind, code, story, to, size = 'normal' }: TagProps): ReactElement {
-  const { anchor, card } = useHoverCard(story, () => copyText(code));
+  const { anchor, card } = useHoverCard(story, {
+    onCopy: () => copyText(code),
+    onPrint: () => openPrint({ kind, code, story }),
+  });
   const address = to === null ? undefined : (to ?? tagAddress(kind, code));
   const style = { fontSize: `${pixels[size] / 16}rem` };
   const copyOnKey = (event: KeyboardEvent): void => {

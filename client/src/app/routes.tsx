@@ -1,9 +1,9 @@
-import { createBrowserRouter, redirect, type RouteObject } from 'react-router-dom';
+import { redirect, type RouteObject } from 'react-router-dom';
 import { accountRoutes, ownAccountRoutes } from '../features/account/routes';
 import { shopRoutes } from '../features/shop/routes';
 import { onlyFor, onlyForSignedIn, onlyForStaff } from './access';
 import { areas } from './areas';
-import { NotFound, RouteFault } from './faults';
+import { NotFound, RootFault, RouteFault } from './faults';
 import { PageLoading, Root } from './root';
 
 const staff: RouteObject = {
@@ -14,21 +14,19 @@ const staff: RouteObject = {
     {
       // A fault inside a page leaves the shell standing.
       ErrorBoundary: RouteFault,
-      children: areas
-        .filter(({ routes }) => routes.length > 0)
-        .map(({ path, roles, routes }) => ({
-          path,
-          loader: onlyFor(roles),
-          ErrorBoundary: RouteFault,
-          children: [...routes, notFound()],
-        })),
+      children: areas.map(({ path, roles, routes }) => ({
+        path,
+        loader: onlyFor(roles),
+        ErrorBoundary: RouteFault,
+        children: [...routes, notFound()],
+      })),
     },
   ],
 };
 
 const fullScreen: RouteObject = {
   lazy: () => import('./shell/bench-shell'),
-  ErrorBoundary: RouteFault,
+  ErrorBoundary: RootFault,
   children: areas
     .filter(({ fullScreenRoutes }) => fullScreenRoutes)
     .map(({ path, roles, fullScreenRoutes = [] }) => ({
@@ -59,10 +57,8 @@ function notFound(): RouteObject {
 export const routes: RouteObject[] = [
   {
     Component: Root,
-    ErrorBoundary: RouteFault,
+    ErrorBoundary: RootFault,
     HydrateFallback: PageLoading,
     children: [staff, fullScreen, own, { path: '/staff', loader: () => redirect('/today') }, shop],
   },
 ];
-
-export const router = createBrowserRouter(routes);
