@@ -42,6 +42,9 @@ declare
   state text;
 begin
   if tg_table_name = 'bill_line_alternate' then
+    if tg_op = 'UPDATE' and old.line_id <> new.line_id then
+      raise exception 'an alternate stays with its line' using errcode = '23514', constraint = 'bill_revision_frozen';
+    end if;
     select revision_id into touched from bill_line
       where id = case when tg_op = 'DELETE' then old.line_id else new.line_id end;
   else
@@ -71,7 +74,9 @@ begin
   end if;
   if new.part_id <> old.part_id or new.number <> old.number
      or (old.status = 'released' and new.status = 'draft')
-     or (old.status = 'superseded' and new.status <> 'superseded') then
+     or (old.status = 'superseded' and new.status <> 'superseded')
+     or (old.status <> 'draft' and (new.note, new.created_at, new.created_by, new.released_at, new.released_by)
+       is distinct from (old.note, old.created_at, old.created_by, old.released_at, old.released_by)) then
     raise exception 'a bill revision only goes from draft to released to superseded'
       using errcode = '23514', constraint = 'bill_revision_frozen';
   end if;
@@ -634,7 +639,8 @@ CREATE TABLE public.bill_revision (
     version integer DEFAULT 1 NOT NULL,
     CONSTRAINT bill_revision_number_check CHECK ((number > 0)),
     CONSTRAINT bill_revision_released_instant CHECK (((status = 'draft'::text) = (released_at IS NULL))),
-    CONSTRAINT bill_revision_status_check CHECK ((status = ANY (ARRAY['draft'::text, 'released'::text, 'superseded'::text])))
+    CONSTRAINT bill_revision_status_check CHECK ((status = ANY (ARRAY['draft'::text, 'released'::text, 'superseded'::text]))),
+    CONSTRAINT bill_revision_superseded_instant CHECK (((status = 'superseded'::text) = (superseded_at IS NOT NULL)))
 );
 
 COMMENT ON TABLE public.bill_revision IS 'One numbered state of a part''s bill: what it is made of, how, and how it is tested.';
@@ -751,6 +757,15 @@ ALTER TABLE public.contents_line ALTER COLUMN id ADD GENERATED ALWAYS AS IDENTIT
     NO MAXVALUE
     CACHE 1
 );
+
+CREATE TABLE public.contents_list (
+    kit_part_id bigint NOT NULL,
+    version integer DEFAULT 1 NOT NULL,
+    saved_at timestamp with time zone NOT NULL,
+    saved_by bigint
+);
+
+COMMENT ON TABLE public.contents_list IS 'That a part is packed as a kit, and how often its contents list was saved.';
 
 CREATE TABLE public.cost_pool (
     part_id bigint NOT NULL,
@@ -2146,6 +2161,9 @@ ALTER TABLE ONLY public.contents_line
 ALTER TABLE ONLY public.contents_line
     ADD CONSTRAINT contents_line_position_unique UNIQUE (kit_part_id, "position") DEFERRABLE INITIALLY DEFERRED;
 
+ALTER TABLE ONLY public.contents_list
+    ADD CONSTRAINT contents_list_pkey PRIMARY KEY (kit_part_id);
+
 ALTER TABLE ONLY public.cost_pool
     ADD CONSTRAINT cost_pool_key UNIQUE NULLS NOT DISTINCT (part_id, lot_id);
 
@@ -2754,6 +2772,9 @@ ALTER TABLE ONLY public.contents_line
 ALTER TABLE ONLY public.contents_line
     ADD CONSTRAINT contents_line_part_id_fkey FOREIGN KEY (part_id) REFERENCES public.part(id);
 
+ALTER TABLE ONLY public.contents_list
+    ADD CONSTRAINT contents_list_kit_part_id_fkey FOREIGN KEY (kit_part_id) REFERENCES public.part(id);
+
 ALTER TABLE ONLY public.cost_pool
     ADD CONSTRAINT cost_pool_part_id_fkey FOREIGN KEY (part_id) REFERENCES public.part(id);
 
@@ -3164,6 +3185,8 @@ GRANT SELECT,USAGE ON SEQUENCE public.characteristic_id_seq TO emberlot_server;
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.contents_line TO emberlot_server;
 
 GRANT SELECT,USAGE ON SEQUENCE public.contents_line_id_seq TO emberlot_server;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.contents_list TO emberlot_server;
 
 GRANT SELECT ON TABLE public.cost_pool TO emberlot_server;
 

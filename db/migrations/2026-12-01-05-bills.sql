@@ -14,7 +14,8 @@ create table bill_revision (
   version integer not null default 1,
   constraint bill_revision_number_unique unique (part_id, number),
   constraint bill_revision_part unique (id, part_id),
-  constraint bill_revision_released_instant check ((status = 'draft') = (released_at is null))
+  constraint bill_revision_released_instant check ((status = 'draft') = (released_at is null)),
+  constraint bill_revision_superseded_instant check ((status = 'superseded') = (superseded_at is not null))
 );
 create unique index bill_revision_one_draft on bill_revision (part_id) where status = 'draft';
 create unique index bill_revision_one_released on bill_revision (part_id) where status = 'released';
@@ -97,6 +98,14 @@ create table contents_line (
 create index contents_line_by_part on contents_line (part_id);
 comment on table contents_line is 'One line of a kit''s contents list: what goes into which bag.';
 
+create table contents_list (
+  kit_part_id bigint primary key references part (id),
+  version integer not null default 1,
+  saved_at timestamptz not null,
+  saved_by bigint
+);
+comment on table contents_list is 'That a part is packed as a kit, and how often its contents list was saved.';
+
 -- A released revision is what units were built to: its lines, steps and plan are beyond change.
 create function bill_content_frozen() returns trigger language plpgsql as $$
 declare
@@ -104,6 +113,9 @@ declare
   state text;
 begin
   if tg_table_name = 'bill_line_alternate' then
+    if tg_op = 'UPDATE' and old.line_id <> new.line_id then
+      raise exception 'an alternate stays with its line' using errcode = '23514', constraint = 'bill_revision_frozen';
+    end if;
     select revision_id into touched from bill_line
       where id = case when tg_op = 'DELETE' then old.line_id else new.line_id end;
   else
@@ -129,7 +141,7 @@ create trigger build_step_frozen before insert or update or delete on build_step
 create trigger characteristic_frozen before insert or update or delete on characteristic
   for each row execute function bill_content_frozen();
 
--- Statuses only go forward, and a released revision keeps its part and number.
+-- Statuses only go forward; a revision keeps its part and number, and a released one everything but its status.
 create function bill_revision_guard() returns trigger language plpgsql as $$
 begin
   if tg_op = 'DELETE' then
@@ -141,7 +153,9 @@ begin
   end if;
   if new.part_id <> old.part_id or new.number <> old.number
      or (old.status = 'released' and new.status = 'draft')
-     or (old.status = 'superseded' and new.status <> 'superseded') then
+     or (old.status = 'superseded' and new.status <> 'superseded')
+     or (old.status <> 'draft' and (new.note, new.created_at, new.created_by, new.released_at, new.released_by)
+       is distinct from (old.note, old.created_at, old.created_by, old.released_at, old.released_by)) then
     raise exception 'a bill revision only goes from draft to released to superseded'
       using errcode = '23514', constraint = 'bill_revision_frozen';
   end if;

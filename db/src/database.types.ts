@@ -229,6 +229,13 @@ export interface ContentsLine {
   quantity: string;
 }
 
+export interface ContentsList {
+  kit_part_id: number;
+  saved_at: Timestamp;
+  saved_by: number | null;
+  version: Generated<number>;
+}
+
 export interface CostPool {
   lot_id: number | null;
   part_id: number;
@@ -967,6 +974,7 @@ export interface DB {
   build_step: BuildStep;
   characteristic: Characteristic;
   contents_line: ContentsLine;
+  contents_list: ContentsList;
   cost_pool: CostPool;
   country: Country;
   customer: Customer;

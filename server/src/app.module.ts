@@ -1,4 +1,5 @@
 import { Module } from '@nestjs/common';
+import { BillsModule } from './bills/bills.module.js';
 import { InvoicingModule } from './invoicing/invoicing.module.js';
 import { JournalModule } from './journal/journal.module.js';
 import { PartsModule } from './parts/parts.module.js';
@@ -17,6 +18,7 @@ import { SuppliersModule } from './suppliers/suppliers.module.js';
     SettingsModule,
     PartsModule,
     SuppliersModule,
+    BillsModule,
     // The ledgers and documents that others post to
     StockModule,
     JournalModule,

@@ -18,6 +18,175 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/bill-components': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** Parts that can stand in a bill or a kit. */
+    get: operations['Bills_components'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bills': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** Parts with a bill, released or in draft. */
+    get: operations['Bills_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bills/{code}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** The revisions of a part's bill. */
+    get: operations['Bills_open'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bills/{code}/comparison': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** Two revisions, line by line. */
+    get: operations['Bills_compare'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bills/{code}/revisions': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Bills_create'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bills/{code}/revisions/{number}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Bills_revision'];
+    /** Saves a draft whole. */
+    put: operations['Bills_edit'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bills/{code}/revisions/{number}/discard': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Throws a draft away. */
+    post: operations['Bills_discard'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bills/{code}/revisions/{number}/release': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Puts a draft in force; it cannot change from then on. */
+    post: operations['Bills_release'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bills/{code}/revisions/{number}/tree': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** A revision over all levels: each place, and each part summed. */
+    get: operations['Bills_tree'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bills/{code}/where-used': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** What a part is in, at every level. */
+    get: operations['Bills_whereUsed'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/bins': {
     parameters: {
       query?: never;
@@ -901,6 +1070,117 @@ export interface components {
       items: components['schemas']['AuditEntryDto'][];
       total: number;
     };
+    BillComparisonDto: {
+      from: number;
+      lines: components['schemas']['LineChangeDto'][];
+      steps: components['schemas']['StepChangeDto'][];
+      testPlan: components['schemas']['CharacteristicChangeDto'][];
+      to: number;
+    };
+    BillDto: {
+      draft: number | null;
+      part: components['schemas']['BillPartDto'];
+      released: number | null;
+      /** @description The newest first. */
+      revisions: components['schemas']['RevisionSummaryDto'][];
+      usedIn: number;
+    };
+    BillEditDto: {
+      lines: components['schemas']['BillLineInputDto'][];
+      note?: string | null;
+      steps: components['schemas']['BuildStepInputDto'][];
+      testPlan: components['schemas']['CharacteristicInputDto'][];
+      version: number;
+    };
+    BillLineDto: {
+      alternates: components['schemas']['BillPartDto'][];
+      /** @description Number of the released revision of the component's own bill, if it is made. */
+      madeBy: number | null;
+      marks: string | null;
+      note: string | null;
+      part: components['schemas']['BillPartDto'];
+      position: number;
+      quantityPer: string;
+      scrapPercent: string;
+    };
+    BillLineInputDto: {
+      /** @description Codes of the parts approved to stand in, the preferred one first. */
+      alternates: string[];
+      /** @description Position marks, such as R1 R2. */
+      marks?: string | null;
+      note?: string | null;
+      /** @description The component's code. */
+      part: string;
+      /** @description Where the line stands; unique within the bill, and what the exploded drawing numbers it by. */
+      position: number;
+      /**
+       * Format: decimal
+       * @description In the component's stock unit, for one made.
+       * @example 12.5
+       */
+      quantityPer: string;
+      /** @description Share of what is taken that is normally lost, in percent. */
+      scrapPercent: string;
+    };
+    BillListDto: {
+      items: components['schemas']['BillListItemDto'][];
+      total: number;
+    };
+    BillListItemDto: {
+      code: string;
+      draft: number | null;
+      /** Format: date-time */
+      draftedAt: string | null;
+      draftVersion: number | null;
+      /** @description Of the revision in force, or of the draft where there is none. */
+      lines: number;
+      measure: string;
+      minutes: string;
+      name: string;
+      /** @description Number of the revision in force. */
+      released: number | null;
+      /** Format: date-time */
+      releasedAt: string | null;
+      retired: boolean;
+      traced: string;
+      /** @description Released bills that this part is in. */
+      usedIn: number;
+    };
+    BillPartDto: {
+      code: string;
+      /** @description The stock unit. */
+      measure: string;
+      name: string;
+      retired: boolean;
+      traced: string;
+    };
+    BillRevisionDto: {
+      /** Format: date-time */
+      createdAt: string;
+      createdBy: string | null;
+      lines: components['schemas']['BillLineDto'][];
+      /** @description Of all steps, for one made. */
+      minutes: string;
+      note: string | null;
+      number: number;
+      part: components['schemas']['BillPartDto'];
+      /** Format: date-time */
+      releasedAt: string | null;
+      releasedBy: string | null;
+      /** @enum {string} */
+      status: 'draft' | 'released' | 'superseded';
+      steps: components['schemas']['BuildStepDto'][];
+      /** Format: date-time */
+      supersededAt: string | null;
+      testPlan: components['schemas']['CharacteristicDto'][];
+      version: number;
+    };
+    BillTreeDto: {
+      quantity: string;
+      rows: components['schemas']['TreeRowDto'][];
+      /** @description One row per part, summed over every place. */
+      totals: components['schemas']['TreeTotalDto'][];
+    };
     BinContentDto: {
       expiresOn: string | null;
       lot: string;
@@ -950,6 +1230,56 @@ export interface components {
     BinRetireDto: {
       version: number;
     };
+    BuildStepDto: {
+      caution: string | null;
+      instruction: string;
+      minutes: string;
+      position: number;
+      title: string;
+    };
+    BuildStepInputDto: {
+      /** @description Shown wherever the step is done. */
+      caution?: string | null;
+      instruction: string;
+      /** @description For one made. */
+      minutes: string;
+      title: string;
+    };
+    CharacteristicChangeDto: {
+      after: components['schemas']['CharacteristicDto'] | null;
+      before: components['schemas']['CharacteristicDto'] | null;
+      fields: string[];
+      /** @enum {string} */
+      kind: 'added' | 'removed' | 'changed';
+    };
+    CharacteristicDto: {
+      caution: string | null;
+      condition: string | null;
+      digits: number | null;
+      /** @enum {string} */
+      kind: 'numeric' | 'yes_no';
+      lowerLimit: string | null;
+      name: string;
+      position: number;
+      target: string | null;
+      unit: string | null;
+      upperLimit: string | null;
+    };
+    CharacteristicInputDto: {
+      /** @description Shown wherever the reading is taken. */
+      caution?: string | null;
+      /** @description What the reading is taken at, such as 30 s after switching on. */
+      condition?: string | null;
+      /** @description Decimals a reading is given with. */
+      digits?: number | null;
+      /** @enum {string} */
+      kind: 'numeric' | 'yes_no';
+      lowerLimit?: string | null;
+      name: string;
+      target?: string | null;
+      unit?: string | null;
+      upperLimit?: string | null;
+    };
     ClosedDayDto: {
       /**
        * Format: date
@@ -968,6 +1298,21 @@ export interface components {
     };
     ClosedDaysDto: {
       items: components['schemas']['ClosedDayDto'][];
+      total: number;
+    };
+    ComponentDto: {
+      code: string;
+      /** @description Whether it has a released bill of its own. */
+      made: boolean;
+      /** @description The stock unit. */
+      measure: string;
+      name: string;
+      retired: boolean;
+      traced: string;
+      unitWeightG: string | null;
+    };
+    ComponentListDto: {
+      items: components['schemas']['ComponentDto'][];
       total: number;
     };
     CountriesDto: {
@@ -1145,6 +1490,21 @@ export interface components {
       /** @enum {string} */
       role: 'owner' | 'assembler' | 'accountant';
     };
+    KitUseDto: {
+      bag: string;
+      part: components['schemas']['BillPartDto'];
+      quantity: string;
+      /** @description What of it, or of what it is in, lies in the kit. */
+      through: string;
+    };
+    LineChangeDto: {
+      after: components['schemas']['BillLineDto'] | null;
+      before: components['schemas']['BillLineDto'] | null;
+      /** @description Which fields differ. */
+      fields: string[];
+      /** @enum {string} */
+      kind: 'added' | 'removed' | 'changed';
+    };
     LinkDto: {
       token: string;
     };
@@ -1183,7 +1543,7 @@ export interface components {
       quantity: string;
       receivedOn: string | null;
       /** @enum {string} */
-      status: 'held' | 'released' | 'rejected';
+      status: 'released' | 'held' | 'rejected';
       statusChanges: components['schemas']['LotStatusChangeDto'][];
       supplier: string | null;
       supplierLot: string | null;
@@ -1204,7 +1564,7 @@ export interface components {
       quantity: string;
       receivedOn: string | null;
       /** @enum {string} */
-      status: 'held' | 'released' | 'rejected';
+      status: 'released' | 'held' | 'rejected';
       supplier: string | null;
       supplierLot: string | null;
     };
@@ -1262,6 +1622,13 @@ export interface components {
     MovePageDto: {
       items: components['schemas']['MoveDto'][];
       total: number;
+    };
+    NewDraftDto: {
+      /**
+       * @description `released` copies the revision in force; `nothing` begins an empty one.
+       * @enum {string}
+       */
+      from: 'nothing' | 'released';
     };
     OutboxMailDto: {
       attempts: number;
@@ -1484,6 +1851,25 @@ export interface components {
       /** @description Why it was wrong. */
       reason: string;
     };
+    RevisionSummaryDto: {
+      /** Format: date-time */
+      createdAt: string;
+      createdBy: string | null;
+      lines: number;
+      note: string | null;
+      number: number;
+      /** Format: date-time */
+      releasedAt: string | null;
+      releasedBy: string | null;
+      /** @enum {string} */
+      status: 'draft' | 'released' | 'superseded';
+      /** Format: date-time */
+      supersededAt: string | null;
+      version: number;
+    };
+    RevisionVersionDto: {
+      version: number;
+    };
     /** @enum {string} */
     Role: 'owner' | 'assembler' | 'accountant' | 'customer';
     SessionDto: {
@@ -1650,6 +2036,13 @@ export interface components {
     };
     /** @enum {string} */
     StaffRole: 'owner' | 'assembler' | 'accountant';
+    StepChangeDto: {
+      after: components['schemas']['BuildStepDto'] | null;
+      before: components['schemas']['BuildStepDto'] | null;
+      fields: string[];
+      /** @enum {string} */
+      kind: 'added' | 'removed' | 'changed';
+    };
     StockDocumentDto: {
       number: string;
     };
@@ -1744,6 +2137,44 @@ export interface components {
       /** @description Where it goes. */
       toBin: string;
     };
+    TreeRowDto: {
+      alternates: string[];
+      level: number;
+      madeBy: number | null;
+      marks: string | null;
+      parent: string;
+      part: components['schemas']['BillPartDto'];
+      /** @description Positions from the made part down to this line. */
+      path: number[];
+      /** @description What this place takes with its allowance for scrap, not rounded. */
+      quantity: string;
+      quantityPer: string;
+      scrapPercent: string;
+    };
+    TreeTotalDto: {
+      /** @description Longest way down to it. */
+      level: number;
+      made: boolean;
+      part: components['schemas']['BillPartDto'];
+      /** @description Rounded up once per bill to what can be handed out. */
+      quantity: string;
+    };
+    UseDto: {
+      /** @description Whether it is only an alternate of the line. */
+      alternate: boolean;
+      /** @description 1 where the part itself is in the bill, 2 where what it is in is in the bill, and so on. */
+      level: number;
+      part: components['schemas']['BillPartDto'];
+      /** @description Codes from the part up to this bill's part. */
+      path: string[];
+      position: number;
+      quantityPer: string;
+      revision: number;
+      /** @enum {string} */
+      status: 'draft' | 'released' | 'superseded';
+      /** @description Whether nothing that is in force or in draft contains this bill's part. */
+      top: boolean;
+    };
     /** @enum {string} */
     UserStatus: 'invited' | 'unconfirmed' | 'active' | 'disabled';
     VatExceptionDto: {
@@ -1794,6 +2225,11 @@ export interface components {
       items: components['schemas']['VatRateDto'][];
       total: number;
     };
+    WhereUsedDto: {
+      kits: components['schemas']['KitUseDto'][];
+      part: components['schemas']['BillPartDto'];
+      uses: components['schemas']['UseDto'][];
+    };
   };
   responses: never;
   parameters: never;
@@ -1835,6 +2271,376 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['AuditPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bills_components: {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ComponentListDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bills_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+        /** @description `draft`: those with a draft; `released`: those with a revision in force; `unreleased`: those with a draft only. */
+        state?: 'draft' | 'released' | 'unreleased';
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BillListDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bills_open: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BillDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bills_compare: {
+    parameters: {
+      query: {
+        from: number;
+        to: number;
+      };
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BillComparisonDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bills_create: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['NewDraftDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BillRevisionDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bills_revision: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+        number: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BillRevisionDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bills_edit: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+        number: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BillEditDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BillRevisionDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bills_discard: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+        number: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['RevisionVersionDto'];
+      };
+    };
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bills_release: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+        number: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['RevisionVersionDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BillRevisionDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bills_tree: {
+    parameters: {
+      query?: {
+        /** @description How many are made; one when nothing is said. */
+        quantity?: string;
+      };
+      header?: never;
+      path: {
+        code: string;
+        number: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BillTreeDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Bills_whereUsed: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['WhereUsedDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */
