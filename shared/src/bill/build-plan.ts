@@ -1,10 +1,11 @@
 import { Decimal } from '../measure/decimal.js';
 import type { PartKey } from './bill-lines.js';
 import { type BuildNetwork, timesRoundedUp } from './build-network.js';
-import { type ShortagePrice, buildProgram } from './build-program.js';
+import { type BuildProgram, type ShortagePrice, buildProgram } from './build-program.js';
 import { type BuildRanges, buildRanges } from './build-ranges.js';
-import { independentParts } from './independent-parts.js';
-import { solveIntegerProgram } from './integer-program.js';
+import { type ProgramPart, independentParts } from './independent-parts.js';
+import { type EffortBudget, solveIntegerProgram } from './integer-program.js';
+import { ShareRepair, type Shares, fitsPlainNumbers } from './share-repair.js';
 
 /** One way to build: quantities in stock units. */
 export interface BuildPlan {
@@ -39,38 +40,95 @@ export type PlanAnswer =
  *
  * @param quantity in steps of the part to build
  * @param price what a missing step of a bought part counts; undefined when nothing may be missing
- * @param budget branching steps left, shared between calls
+ * @param budget how much may be searched
  * @returns a plan (with prices: the one with the least missing), or that there is none
  */
 export function findBuildPlan(
   network: BuildNetwork,
   quantity: bigint,
   price: ShortagePrice | undefined,
-  budget: { steps: number },
+  budget: EffortBudget,
 ): PlanAnswer {
   const ranges = buildRanges(network, quantity);
   const program = buildProgram(network, ranges, price);
-  const values = program.variables.map(() => 0);
-  let proven = true;
-  for (const part of independentParts(program) ?? [undefined]) {
-    if (part === undefined) return { status: 'none' };
-    const first = part.original.every((index) => !program.missing.has(index));
-    const answer = solveIntegerProgram(part, { first, budget });
-    if (answer.status !== 'found') return { status: answer.status };
+  const shares = program.shares.map((variables) => variables.map(() => 0));
+  const parts = independentParts(program);
+  if (parts === undefined) return { status: 'none' };
+  let [proven, decided] = [true, true];
+  for (const part of parts) {
+    const first = part.originalVariables.every((index) => !program.missing.has(index));
+    const places = sharePlaces(program, part);
+    const repair = repairOf(network, ranges, quantity, program, part, places, budget);
+    const answer = solveIntegerProgram(part, { first, budget, ...(repair && { repair }) });
+    if (answer.status === 'none') return { status: 'none' };
+    if (answer.status === 'undecided') decided = false;
+    if (answer.status !== 'found') continue;
     proven &&= answer.proven || first;
-    part.original.forEach((index, at) => (values[index] = answer.values[at] ?? 0));
+    for (const { line, option, at } of places) (shares[line] ?? [])[option] = answer.values[at] ?? 0;
   }
-  const shares = program.shares.map((variables) => variables.map((index) => BigInt(values[index] ?? 0)));
+  if (!decided) return { status: 'undecided' };
   return { status: 'found', plan: readPlan(network, ranges, quantity, shares), proven };
 }
 
-/** Works the chosen shares through from the top; whatever the program took too much of is not taken here. */
-function readPlan(
+interface SharePlace {
+  readonly line: number;
+  readonly option: number;
+  /** Its variable in the part of the program. */
+  readonly at: number;
+}
+
+function sharePlaces(program: BuildProgram, part: ProgramPart): SharePlace[] {
+  const place = new Map(part.originalVariables.map((variable, at) => [variable, at]));
+  return program.shares.flatMap((variables, line) =>
+    variables.flatMap((variable, option) => {
+      const at = place.get(variable);
+      return at === undefined ? [] : [{ line, option, at }];
+    }),
+  );
+}
+
+/** Shortage that no plan may have weighs more than any that may be paid for. */
+const forbiddenWeight = 1e6;
+/** Setting a share takes about as long as working on so many entries of a tableau. */
+const workPerShare = 50;
+
+function repairOf(
   network: BuildNetwork,
   ranges: BuildRanges,
   quantity: bigint,
-  shares: readonly (readonly bigint[])[],
-): BuildPlan {
+  program: BuildProgram,
+  part: ProgramPart,
+  places: readonly SharePlace[],
+  budget: EffortBudget,
+): ((values: readonly number[]) => readonly number[] | undefined) | undefined {
+  if (places.length === 0 || !fitsPlainNumbers(network, ranges.make)) return undefined;
+  const weights = network.parts.map(() => 0);
+  for (const row of part.originalRows) {
+    const balanced = program.balances.get(row);
+    if (balanced !== undefined && network.parts[balanced]?.lines.length === 0) weights[balanced] = forbiddenWeight;
+  }
+  const missingPlaces = part.originalVariables.flatMap((variable, at) => {
+    const of = program.missing.get(variable);
+    if (of !== undefined) weights[of] = part.variables[at]?.cost ?? 0;
+    return of === undefined ? [] : [{ of, at }];
+  });
+  const mayMiss = new Set(missingPlaces.map(({ of }) => of));
+  return (values) => {
+    const wish: number[][] = network.lines.map(() => []);
+    for (const { line, option, at } of places) (wish[line] ?? [])[option] = values[at] ?? 0;
+    const search = new ShareRepair(network, ranges.settled, weights);
+    const { shares, missing } = search.find(Number(quantity), wish);
+    budget.work -= search.work * workPerShare;
+    if (missing.some((steps, of) => steps > 0 && !mayMiss.has(of))) return undefined;
+    const repaired = [...values];
+    for (const { line, option, at } of places) repaired[at] = shares[line]?.[option] ?? 0;
+    for (const { of, at } of missingPlaces) repaired[at] = missing[of] ?? 0;
+    return repaired;
+  };
+}
+
+/** Works the chosen shares through from the top; whatever the program took too much of is not taken here. */
+function readPlan(network: BuildNetwork, ranges: BuildRanges, quantity: bigint, shares: Shares): BuildPlan {
   const need = network.parts.map(() => 0n);
   const [takes, made, missing]: [PlannedTake[], PlannedQuantity[], PlannedQuantity[]] = [[], [], []];
   const amount = (index: number, steps: bigint): PlannedQuantity => {
@@ -87,7 +145,8 @@ function readPlan(
       let left = timesRoundedUp(short, line.basis);
       const settled = ranges.settled[lineIndex];
       line.options.forEach((option, at) => {
-        const wanted = settled === undefined ? (shares[lineIndex]?.[at] ?? 0n) : settled === at ? left : 0n;
+        const wanted =
+          settled === undefined ? BigInt(Math.round(shares[lineIndex]?.[at] ?? 0)) : settled === at ? left : 0n;
         const share = wanted < left ? wanted : left;
         left -= share;
         if (share === 0n) return;

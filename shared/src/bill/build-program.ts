@@ -6,8 +6,10 @@ import type { IntegerProgram, IntegerRow, IntegerVariable } from './integer-prog
 export interface BuildProgram extends IntegerProgram {
   /** By line: the variables of its options' shares; empty where the line is settled. */
   readonly shares: readonly (readonly number[])[];
-  /** Variables that say how much of a part is missing. */
-  readonly missing: ReadonlySet<number>;
+  /** By variable that says how much of a part is missing: the part. */
+  readonly missing: ReadonlyMap<number, number>;
+  /** By row that weighs what is asked of a part against what there is: the part. */
+  readonly balances: ReadonlyMap<number, number>;
 }
 
 /** What a missing step of a bought part (by index) counts; undefined: of this one nothing may be missing. */
@@ -33,7 +35,8 @@ class ProgramBuilder {
   private readonly variables: IntegerVariable[] = [];
   private readonly rows: IntegerRow[] = [];
   private readonly shares: number[][];
-  private readonly missing = new Set<number>();
+  private readonly missing = new Map<number, number>();
+  private readonly balances = new Map<number, number>();
   private readonly asked = new Map<number, Expression[]>();
 
   constructor(
@@ -50,7 +53,8 @@ class ProgramBuilder {
       const built = this.balance(index);
       for (const line of lines) this.askFor(line, built);
     });
-    return { variables: this.variables, rows: this.rows, shares: this.shares, missing: this.missing };
+    const { variables, rows, shares, missing, balances } = this;
+    return { variables, rows, shares, missing, balances };
   }
 
   private add(lower: bigint, upper: bigint, cost = 0): Expression & { index: number } {
@@ -73,14 +77,15 @@ class ProgramBuilder {
     const built = make.least === make.most ? constant(make.least) : this.add(make.least, make.most);
     const needMost = this.ranges.need[index]?.most ?? 0n;
     const cost = part.lines.length === 0 ? this.price?.(index) : undefined;
-    const missing = cost === undefined ? constant(0n) : this.addMissing(needMost, cost);
+    const missing = cost === undefined ? constant(0n) : this.addMissing(index, needMost, cost);
+    this.balances.set(this.rows.length, index);
     this.atMost(asked, sum([constant(part.stock), built, missing]));
     return built;
   }
 
-  private addMissing(most: bigint, cost: number): Expression {
+  private addMissing(part: number, most: bigint, cost: number): Expression {
     const variable = this.add(0n, most, cost);
-    this.missing.add(variable.index);
+    this.missing.set(variable.index, part);
     return variable;
   }
 

@@ -16,19 +16,27 @@ export interface LinearRow {
   readonly limit: number;
 }
 
+export interface Bounds {
+  readonly lower: Float64Array;
+  readonly upper: Float64Array;
+}
+
 export type LinearStatus = 'optimal' | 'infeasible' | 'unclear';
 
 const tolerance = 1e-9;
 
 /**
  * The dual simplex method on a dense condensed tableau, with bounds kept out of the rows.
- * It starts from the slack basis, which is dual feasible once every variable sits at its cheaper bound, and it stays
- * dual feasible when a bound is tightened, so a branching search goes on from where its parent stopped (`copy`).
+ * It starts from the slack basis, which is dual feasible once every variable sits at its cheaper bound, and every basis
+ * it reaches is dual feasible whatever the bounds, so a branching search goes from one set of bounds to the next.
  *
  * Source: the bounded dual simplex method as in R. J. Vanderbei, Linear Programming (from memory);
  * smallest-index rule against cycling: R. G. Bland, Mathematics of Operations Research 2 (1977) 103-107 (from memory).
  */
 export class DualSimplex {
+  /** Entries of the tableau looked at so far: a measure of effort that is the same on every machine. */
+  work = 0;
+  pivots = 0;
   private readonly size: number;
   private readonly height: number;
   private readonly table: Float64Array;
@@ -40,41 +48,46 @@ export class DualSimplex {
   private readonly nonbasic: Int32Array;
   private readonly atUpper: Uint8Array;
 
-  constructor(
-    private readonly program: LinearProgram,
-    from?: DualSimplex,
-  ) {
+  constructor(private readonly program: LinearProgram) {
     this.size = program.cost.length;
     this.height = program.rows.length;
-    this.table = from?.table.slice() ?? new Float64Array(this.size * this.height);
-    this.basicValue = from?.basicValue.slice() ?? new Float64Array(this.height);
-    this.reducedCost = from?.reducedCost.slice() ?? Float64Array.from(program.cost);
+    this.table = new Float64Array(this.size * this.height);
+    this.basicValue = new Float64Array(this.height);
+    this.reducedCost = Float64Array.from(program.cost);
     const noLimit = Array.from({ length: this.height }, () => Infinity);
-    this.lower = from?.lower.slice() ?? Float64Array.from([...program.lower, ...noLimit.map(() => 0)]);
-    this.upper = from?.upper.slice() ?? Float64Array.from([...program.upper, ...noLimit]);
-    this.basic = from?.basic.slice() ?? Int32Array.from(noLimit, (_, row) => this.size + row);
-    this.nonbasic = from?.nonbasic.slice() ?? Int32Array.from(program.cost, (_, column) => column);
-    this.atUpper = from?.atUpper.slice() ?? Uint8Array.from(program.cost, (cost) => (cost < 0 ? 1 : 0));
-    if (from === undefined) this.fillTable();
+    this.lower = Float64Array.from([...program.lower, ...noLimit.map(() => 0)]);
+    this.upper = Float64Array.from([...program.upper, ...noLimit]);
+    this.basic = Int32Array.from(noLimit, (_, row) => this.size + row);
+    this.nonbasic = Int32Array.from(program.cost, (_, column) => column);
+    this.atUpper = Uint8Array.from(program.cost, (cost) => (cost < 0 ? 1 : 0));
+    this.fillTable();
+    this.work = this.table.length;
   }
 
-  copy(): DualSimplex {
-    return new DualSimplex(this.program, this);
+  /** Lower and upper bounds of all variables as they are now. */
+  bounds(): Bounds {
+    return { lower: this.lower.slice(0, this.size), upper: this.upper.slice(0, this.size) };
   }
 
-  boundsOf(variable: number): { lower: number; upper: number } {
-    return { lower: this.lower[variable] as number, upper: this.upper[variable] as number };
+  /** Replaces the bounds of all variables; call `solve` afterwards. Any bounds do: the basis stays dual feasible. */
+  setBounds({ lower, upper }: Bounds): void {
+    const columns = new Map(Array.from(this.nonbasic, (variable, column) => [variable, column]));
+    lower.forEach((low, variable) => {
+      if (low === this.lower[variable] && upper[variable] === this.upper[variable]) return;
+      const column = columns.get(variable);
+      const before = column === undefined ? 0 : this.valueOfColumn(column);
+      this.lower[variable] = low;
+      this.upper[variable] = upper[variable] as number;
+      if (column !== undefined) this.chooseCheaperBound(column);
+      const shift = column === undefined ? 0 : this.valueOfColumn(column) - before;
+      if (column !== undefined && shift !== 0) this.shiftBasics(column, shift);
+    });
   }
 
-  /** Tightens the bounds of a variable; call `solve` afterwards. */
-  restrict(variable: number, lower: number, upper: number): void {
-    const column = this.nonbasic.indexOf(variable);
-    const before = column < 0 ? 0 : this.valueOfColumn(column);
-    this.lower[variable] = lower;
-    this.upper[variable] = upper;
-    if (column < 0) return;
-    const shift = this.valueOfColumn(column) - before;
-    if (shift !== 0) this.shiftBasics(column, shift);
+  /** A variable that was fixed may have got a reduced cost of either sign; freed, it must sit where that fits. */
+  private chooseCheaperBound(column: number): void {
+    const cost = this.reducedCost[column] as number;
+    if (Math.abs(cost) > tolerance) this.atUpper[column] = cost < 0 ? 1 : 0;
   }
 
   /** Moves to an optimum of the present bounds, or proves that there is none. */
@@ -82,6 +95,7 @@ export class DualSimplex {
     const patience = 50 * (this.height + this.size) + 1000;
     for (let step = 0; step < patience; step += 1) {
       const careful = step > patience / 4;
+      this.work += this.height + this.size;
       const row = this.leavingRow(careful);
       if (row < 0) return 'optimal';
       const column = this.enteringColumn(row, careful);
@@ -172,6 +186,7 @@ export class DualSimplex {
   }
 
   private exchange(row: number, column: number): void {
+    this.pivots += 1;
     const leaving = this.basic[row] as number;
     const entering = this.nonbasic[column] as number;
     const toUpper = this.violation(row) > 0;
@@ -199,6 +214,7 @@ export class DualSimplex {
     for (let i = 0, at = column; i < this.height; i += 1, at += size) {
       const factor = table[at] as number;
       if (i === row || factor === 0) continue;
+      this.work += filled.length;
       const base = i * size;
       for (const j of filled) {
         const entry = (table[base + j] as number) - factor * (table[start + j] as number);

@@ -1,8 +1,10 @@
 import type { IntegerProgram } from './integer-program.js';
 
-/** A program that shares no variable with the others; `variables[i]` of it is `original[i]` of the whole. */
+/** A program that shares no variable with the others. */
 export interface ProgramPart extends IntegerProgram {
-  readonly original: readonly number[];
+  /** Its variables and rows as numbered in the whole. */
+  readonly originalVariables: readonly number[];
+  readonly originalRows: readonly number[];
 }
 
 /**
@@ -26,15 +28,17 @@ export function independentParts({ variables, rows }: IntegerProgram): ProgramPa
     for (const { variable } of terms) leader[find(variable)] = find(first?.variable ?? variable);
   }
   const members = groupBy(variables.keys(), find);
-  const rowsOf = groupBy(rows, ({ terms }) => (terms[0] === undefined ? -1 : find(terms[0].variable)));
+  const rowsOf = groupBy(rows.keys(), (row) => find(rows[row]?.terms[0]?.variable ?? -1));
   return [...members].map(([key, original]) => {
     const place = new Map(original.map((variable, index) => [variable, index]));
+    const originalRows = rowsOf.get(key) ?? [];
     return {
-      original,
+      originalVariables: original,
+      originalRows,
       variables: original.flatMap((index) => variables[index] ?? []),
-      rows: (rowsOf.get(key) ?? []).map(({ terms, limit }) => ({
-        limit,
-        terms: terms.map((term) => ({ ...term, variable: place.get(term.variable) ?? 0 })),
+      rows: originalRows.map((row) => ({
+        limit: rows[row]?.limit ?? 0n,
+        terms: (rows[row]?.terms ?? []).map((term) => ({ ...term, variable: place.get(term.variable) ?? 0 })),
       })),
     };
   });

@@ -13,7 +13,7 @@ function maximise(gains: number[], rows: number[][], limits: number[], upper: nu
 }
 
 function best(program: IntegerProgram): readonly number[] {
-  const answer = solveIntegerProgram(program, { first: false, budget: { steps: 1000 } });
+  const answer = solveIntegerProgram(program, { first: false, budget: { branchings: 1000, work: 1e9 } });
   if (answer.status !== 'found' || !answer.proven) throw new Error(`not proven: ${answer.status}`);
   return answer.values;
 }

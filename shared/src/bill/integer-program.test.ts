@@ -50,7 +50,7 @@ describe('whole-number programs', () => {
   test('have the same optimum as looking at every point', () => {
     fc.assert(
       fc.property(programs, (program) => {
-        const answer = solveIntegerProgram(program, { first: false, budget: { steps: 10_000 } });
+        const answer = solveIntegerProgram(program, { first: false, budget: { branchings: 10_000, work: 1e9 } });
         const expected = cheapestByEnumeration(program);
         if (expected === undefined) return expect(answer.status).toBe('none');
         if (answer.status !== 'found') throw new Error('a solution exists and was not found');
@@ -65,7 +65,7 @@ describe('whole-number programs', () => {
   test('are decided the same way when any solution will do', () => {
     fc.assert(
       fc.property(programs, (program) => {
-        const answer = solveIntegerProgram(program, { first: true, budget: { steps: 10_000 } });
+        const answer = solveIntegerProgram(program, { first: true, budget: { branchings: 10_000, work: 1e9 } });
         expect(answer.status).toBe(cheapestByEnumeration(program) === undefined ? 'none' : 'found');
       }),
       { numRuns: 1500 },
@@ -80,12 +80,18 @@ describe('whole-number programs', () => {
         limit: sign * 29n,
       })),
     };
-    expect(solveIntegerProgram(program, { first: true, budget: { steps: 0 } }).status).toBe('undecided');
-    expect(solveIntegerProgram(program, { first: true, budget: { steps: 10_000 } }).status).toBe('none');
+    expect(solveIntegerProgram(program, { first: true, budget: { branchings: 0, work: 1e9 } }).status).toBe(
+      'undecided',
+    );
+    expect(solveIntegerProgram(program, { first: true, budget: { branchings: 10_000, work: 1e9 } }).status).toBe(
+      'none',
+    );
   });
 
   test('no variables: the rows alone decide', () => {
     const rows = [{ terms: [], limit: -1n }];
-    expect(solveIntegerProgram({ variables: [], rows }, { first: true, budget: { steps: 9 } }).status).toBe('none');
+    expect(
+      solveIntegerProgram({ variables: [], rows }, { first: true, budget: { branchings: 9, work: 1e9 } }).status,
+    ).toBe('none');
   });
 });

@@ -1,4 +1,4 @@
-import { DualSimplex, type LinearProgram } from './dual-simplex.js';
+import { type Bounds, DualSimplex, type LinearProgram } from './dual-simplex.js';
 
 /** Minimise cost · x over whole numbers x with rows · x ≤ limits and lower ≤ x ≤ upper. Data of rows is exact. */
 export interface IntegerProgram {
@@ -25,8 +25,21 @@ export type IntegerAnswer =
 export interface SearchOptions {
   /** Stop at the first solution instead of looking for the cheapest. */
   readonly first: boolean;
-  /** Shared between calls: how many branching steps are left. */
-  readonly budget: { steps: number };
+  /**
+   * May make a whole-number solution out of a point of the relaxation. What it answers counts as a solution without a
+   * further check.
+   */
+  readonly repair?: (values: readonly number[]) => readonly number[] | undefined;
+  /** Shared between calls. */
+  readonly budget: EffortBudget;
+}
+
+/** How much a search may still do. Counted, not timed, so that answers are the same on every machine. */
+export interface EffortBudget {
+  /** Sides of a branching that may still be looked at; the relaxation as a whole is always looked at. */
+  branchings: number;
+  /** Entries of tableaus that may still be worked on; about 300 million take a second. */
+  work: number;
 }
 
 /**
@@ -47,80 +60,98 @@ export function solveIntegerProgram(program: IntegerProgram, options: SearchOpti
   return search.cutShort ? { status: 'undecided' } : { status: 'none' };
 }
 
-interface Branch {
-  readonly simplex: DualSimplex;
-  readonly variable: number;
-  readonly lower: number;
-  readonly upper: number;
-}
+/** A tableau is set up anew after so much use, since it collects rounding. */
+const pivotsBeforeRenewal = 3000;
 
 class Search {
   best: readonly number[] | undefined;
   cutShort = false;
   private bestCost = Infinity;
-  private readonly open: Branch[] = [];
+  private readonly open: Bounds[] = [];
+  private readonly linear: LinearProgram;
+  private simplex: DualSimplex;
 
   constructor(
     private readonly program: IntegerProgram,
     private readonly options: SearchOptions,
-  ) {}
+  ) {
+    this.linear = relaxation(program);
+    this.simplex = this.tableau();
+  }
+
+  private tableau(): DualSimplex {
+    const simplex = new DualSimplex(this.linear);
+    this.options.budget.work -= simplex.work;
+    return simplex;
+  }
 
   run(): void {
-    this.visit(new DualSimplex(relaxation(this.program)));
+    this.visit();
+    const { budget } = this.options;
     while (this.open.length > 0 && !(this.options.first && this.best !== undefined)) {
-      if (this.options.budget.steps <= 0) {
+      if (budget.branchings <= 0 || budget.work <= 0) {
         this.cutShort = true;
         return;
       }
-      this.options.budget.steps -= 1;
-      const { simplex, variable, lower, upper } = this.open.pop() as Branch;
-      simplex.restrict(variable, lower, upper);
-      this.visit(simplex);
+      budget.branchings -= 1;
+      if (this.simplex.pivots > pivotsBeforeRenewal) this.simplex = this.tableau();
+      this.simplex.setBounds(this.open.pop() as Bounds);
+      this.visit();
     }
   }
 
-  private visit(simplex: DualSimplex): void {
+  private visit(): void {
+    const { simplex } = this;
+    const before = simplex.work;
     const status = simplex.solve();
+    this.options.budget.work -= simplex.work - before;
     if (status === 'infeasible') return;
     const values = simplex.values();
     const cost = values.reduce((sum, value, index) => sum + value * this.costOf(index), 0);
     if (status === 'optimal' && cost >= this.bestCost - 1e-7 * Math.max(1, Math.abs(this.bestCost))) return;
-    const rounded = values.map((value) => Math.round(value));
+    const rounded = values.map(nearestWhole);
     if (satisfies(this.program, rounded)) this.keep(rounded);
-    const split = this.splitVariable(simplex, values);
-    if (split >= 0) this.branch(simplex, split, values[split] as number);
+    else this.keep(this.options.repair?.(values));
+    if (this.options.first && this.best !== undefined) return;
+    const bounds = simplex.bounds();
+    const split = this.splitVariable(bounds, values);
+    if (split >= 0) this.branch(bounds, split, values[split] as number);
   }
 
   private costOf(variable: number): number {
     return this.program.variables[variable]?.cost ?? 0;
   }
 
-  private keep(values: readonly number[]): void {
+  private keep(values: readonly number[] | undefined): void {
+    if (values === undefined) return;
     const cost = values.reduce((sum, value, index) => sum + value * this.costOf(index), 0);
     if (cost < this.bestCost) [this.best, this.bestCost] = [values, cost];
   }
 
   /** The variable farthest from a whole number; when all are whole but the point was no solution, any that can move. */
-  private splitVariable(simplex: DualSimplex, values: readonly number[]): number {
+  private splitVariable({ lower, upper }: Bounds, values: readonly number[]): number {
     let [chosen, farthest] = [-1, 1e-6];
     values.forEach((value, index) => {
       const distance = Math.abs(value - Math.round(value));
-      const { lower, upper } = simplex.boundsOf(index);
-      if (lower < upper && distance > farthest) [chosen, farthest] = [index, distance];
+      if (distance > farthest && lower[index] !== upper[index]) [chosen, farthest] = [index, distance];
     });
-    if (chosen >= 0 || satisfies(this.program, values.map(Math.round))) return chosen;
-    return values.findIndex((_, index) => simplex.boundsOf(index).lower < simplex.boundsOf(index).upper);
+    if (chosen >= 0 || satisfies(this.program, values.map(nearestWhole))) return chosen;
+    return values.findIndex((_, index) => lower[index] !== upper[index]);
   }
 
-  private branch(simplex: DualSimplex, variable: number, value: number): void {
-    const { lower, upper } = simplex.boundsOf(variable);
+  /** Opens both sides of a value; the nearer one is looked at first. */
+  private branch(bounds: Bounds, variable: number, value: number): void {
+    const [lower, upper] = [bounds.lower[variable] as number, bounds.upper[variable] as number];
     const below = Math.min(Math.max(Math.floor(value), lower), upper - 1);
-    const down = { variable, lower, upper: below };
-    const up = { variable, lower: below + 1, upper };
-    const nearerUp = value - below > 0.5;
-    this.open.push({ simplex: simplex.copy(), ...(nearerUp ? down : up) });
-    this.open.push({ simplex, ...(nearerUp ? up : down) });
+    const down = { ...bounds, upper: bounds.upper.with(variable, below) };
+    const up = { ...bounds, lower: bounds.lower.with(variable, below + 1) };
+    this.open.push(...(value - below > 0.5 ? [down, up] : [up, down]));
   }
+}
+
+/** Rounded, without a negative zero. */
+function nearestWhole(value: number): number {
+  return Math.round(value) + 0;
 }
 
 function satisfies({ variables, rows }: IntegerProgram, values: readonly number[]): boolean {
