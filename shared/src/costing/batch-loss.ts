@@ -39,7 +39,7 @@ export interface BatchCost {
  * @returns the division; `good + abnormalLoss = cost − salvage`
  * @throws ArithmeticError `costing_more_good_than_started`, `costing_nothing_good` when there is a cost, nothing good,
  *   and all of the loss is normal; `costing_quantity_negative`, `costing_value_negative`
- * Source: IAS 2, paragraph 16(a); unit cost (cost − salvage of normal loss) ÷ (started − normal loss) is common practice
+ * @source IAS 2, paragraph 16(a); unit cost (cost − salvage of normal loss) ÷ (started − normal loss) is common practice
  *   of process costing.
  */
 export function divideBatchCost(batch: BatchOutcome): BatchCost {

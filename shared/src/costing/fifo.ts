@@ -61,7 +61,7 @@ export function addLayer(layers: readonly CostLayer[], receipt: CostLayer): read
  * @param mode the way to round the share of the last layer touched
  * @returns the value, what came from which layer, and the layers left
  * @throws ArithmeticError `costing_quantity_not_positive`, `costing_more_than_held`, `costing_layer_broken`
- * Source: IAS 2, paragraphs 25 and 27 (first in, first out).
+ * @source IAS 2, paragraphs 25 and 27 (first in, first out).
  */
 export function issueFifo(
   layers: readonly CostLayer[],

@@ -25,7 +25,7 @@ export type LandedBasis = 'value' | 'weight' | 'quantity';
  * @param basis value for duty and insurance, weight for freight, quantity where neither fits
  * @returns minor units per line, adding up to the cost; ties to the earlier line
  * @throws ArithmeticError `costing_nothing_to_spread_over` if no line has any of the basis; `money_weight_negative`
- * Source: IAS 2, paragraphs 10 and 11 (costs of purchase); largest remainder.
+ * @source IAS 2, paragraphs 10 and 11 (costs of purchase); largest remainder.
  */
 export function spreadLandedCost(
   cost: MinorAmount,
@@ -55,7 +55,7 @@ export interface Destination {
  * @param destinations where all of it is; quantities add up to `received`
  * @returns minor units per destination, adding up to the cost
  * @throws ArithmeticError `costing_destinations_differ`, `costing_nothing_to_spread_over`, `money_weight_negative`
- * Source: IAS 2, paragraphs 10, 11 and 34.
+ * @source IAS 2, paragraphs 10, 11 and 34.
  */
 export function splitLateCost(
   cost: MinorAmount,
@@ -93,7 +93,7 @@ export interface LateCostOnPool {
  * @param pool what is held now
  * @returns the two parts and the pool after them; a pool of quantity zero stays at value zero
  * @throws ArithmeticError `costing_quantity_not_positive`, `money_pool_broken` if a credit is larger than the value held
- * Source: IAS 2, paragraphs 11 and 27; the presumption is common practice, no source.
+ * @source IAS 2, paragraphs 11 and 27; the presumption is common practice, no source.
  */
 export function lateCostOnPool(cost: MinorAmount, received: DecimalInput, pool: CostPool): LateCostOnPool {
   const all = decimal(received);

@@ -20,7 +20,7 @@ export interface OverheadAbsorption {
  * @param jobHours hours of each job, none negative
  * @returns amount per job and the unabsorbed rest, adding up to the overhead
  * @throws ArithmeticError `costing_capacity_not_positive`, `costing_value_negative`, `money_weight_negative`
- * Source: IAS 2, paragraph 13.
+ * @source IAS 2, paragraph 13.
  */
 export function absorbOverhead(
   overhead: MinorAmount,

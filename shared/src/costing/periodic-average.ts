@@ -30,7 +30,7 @@ export interface PeriodicAverage {
  * @param period opening stock, receipts and issues of one part
  * @returns cost of issues and closing stock, which add up to opening and receipts
  * @throws ArithmeticError `costing_more_than_held`, `costing_quantity_not_positive`, `money_pool_broken`
- * Source: IAS 2, paragraph 27 (average on a periodic basis).
+ * @source IAS 2, paragraph 27 (average on a periodic basis).
  */
 export function periodicAverage(period: PeriodMovements): PeriodicAverage {
   const held = sumDecimals([period.opening.quantity, ...period.receipts.map(({ quantity }) => quantity)]);

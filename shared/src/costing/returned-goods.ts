@@ -22,7 +22,7 @@ export interface CostedQuantity {
  * @returns minor units, not negative
  * @throws ArithmeticError `costing_return_too_large`, `costing_quantity_not_positive`, `money_pool_broken` if the
  *   records do not fit each other
- * Source: IAS 2, paragraph 34 (cost of sales follows the cost of the goods); the remainder rule is common practice, no
+ * @source IAS 2, paragraph 34 (cost of sales follows the cost of the goods); the remainder rule is common practice, no
  *   source.
  */
 export function returnValue(

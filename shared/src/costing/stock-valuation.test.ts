@@ -33,6 +33,15 @@ describe('first in, first out', () => {
     expect(issue.layers.map(({ id, quantity, value }) => [id, quantity.toFixed(), value])).toEqual([['B', '2', 620]]);
   });
 
+  it('leaves later layers as they were', () => {
+    const issue = issueFifo([...layers, layer('C', 3, 1, 5)], 1);
+    expect(issue.layers.map(({ id, quantity, value }) => [id, quantity.toFixed(), value])).toEqual([
+      ['A', '2', 667],
+      ['B', '4', 1240],
+      ['C', '1', 5],
+    ]);
+  });
+
   it('gives the last piece of a layer the odd cent', () => {
     const first = issueFifo([layer('A', 1, 3, 1000)], 1);
     const second = issueFifo(first.layers, 1);

@@ -24,7 +24,7 @@ export interface StockValuation {
  * @param events movements of one part, oldest first
  * @returns cost of issues and closing stock, adding up to the receipts
  * @throws ArithmeticError `money_more_than_held`, `money_quantity_not_positive`, `money_value_negative`
- * Source: IAS 2, paragraph 27.
+ * @source IAS 2, paragraph 27.
  */
 export function movingAverageValuation(events: readonly StockEvent[]): StockValuation {
   const perIssue: MinorAmount[] = [];
@@ -44,7 +44,7 @@ export function movingAverageValuation(events: readonly StockEvent[]): StockValu
  * @param events movements of one part, oldest first
  * @returns cost of issues and closing stock, adding up to the receipts
  * @throws ArithmeticError `costing_more_than_held`, `costing_quantity_not_positive`, `costing_layer_broken`
- * Source: IAS 2, paragraphs 25 and 27. It gives the same whether reckoned issue by issue or at the period's end.
+ * @source IAS 2, paragraphs 25 and 27. It gives the same whether reckoned issue by issue or at the period's end.
  */
 export function fifoValuation(events: readonly StockEvent[]): StockValuation {
   const perIssue: MinorAmount[] = [];

@@ -38,7 +38,7 @@ export interface UnitCost {
  * @returns the cost by kind; each kind is rounded once, half to even, and the total is their sum
  * @throws ArithmeticError `costing_value_negative`, `costing_quantity_negative`; `measure_not_a_number`,
  *   `measure_not_exact`, `money_too_large`
- * Source: IAS 2, paragraphs 12 (costs of conversion), 23 and 24 (specific identification).
+ * @source IAS 2, paragraphs 12 (costs of conversion), 23 and 24 (specific identification).
  */
 export function unitCost(input: UnitInput, rates: BenchRates): UnitCost {
   const minutes = decimal(input.minutes);

@@ -23,7 +23,7 @@ export interface StockItem {
  *
  * @param sale price, cost to complete, cost to sell
  * @returns minor units, never below zero
- * Source: IAS 2, paragraph 6.
+ * @source IAS 2, paragraph 6.
  */
 export function netRealisableValue(sale: ExpectedSale): MinorAmount {
   return minorAmount(Math.max(0, sale.price - sale.completion - sale.selling));
@@ -37,7 +37,7 @@ export function netRealisableValue(sale: ExpectedSale): MinorAmount {
  * @param realisable its net realisable value, minor units
  * @returns the change of the carrying value, minor units: negative a write-down, positive a reversal
  * @throws ArithmeticError `costing_carrying_above_cost`, `costing_value_negative`
- * Source: IAS 2, paragraphs 9, 28, 29 and 33.
+ * @source IAS 2, paragraphs 9, 28, 29 and 33.
  */
 export function adjustToRealisable(item: StockItem, realisable: MinorAmount): MinorAmount {
   for (const value of [item.cost, item.carrying, realisable]) {
@@ -64,7 +64,7 @@ export interface FinishedProduct {
  * @param product what it is built into
  * @returns the change of the carrying value, minor units
  * @throws ArithmeticError as {@link adjustToRealisable}
- * Source: IAS 2, paragraph 32.
+ * @source IAS 2, paragraph 32.
  */
 export function adjustMaterial(item: StockItem, replacement: MinorAmount, product: FinishedProduct): MinorAmount {
   return adjustToRealisable(item, product.realisable >= product.cost ? item.cost : replacement);

@@ -34,7 +34,7 @@ export interface GuardedJudgement {
  * @param confidence probability a decision must have at a single limit; 0.95 is the standard's default
  * @returns verdict, guard band, acceptance range and conformance probability
  * @throws ArithmeticError `judge_uncertainty_not_positive`, `judge_confidence`, `measure_not_a_number`
- * Source: ISO 14253-1:2017, 5.2 and 5.3 and its default of 95 % (the guard band is then 1.645 standard uncertainties);
+ * @source ISO 14253-1:2017, 5.2 and 5.3 and its default of 95 % (the guard band is then 1.645 standard uncertainties);
  *   from memory. The normal distribution is presumed.
  */
 export function judgeGuarded(
@@ -69,7 +69,7 @@ export function judgeGuarded(
  * @param standardUncertainty same unit, more than zero
  * @returns 0 to 1, for a normal distribution around the reading
  * @throws ArithmeticError `judge_uncertainty_not_positive`, `measure_not_a_number`
- * Source: JCGM 106:2012, 7.2 to 7.4.
+ * @source JCGM 106:2012, 7.2 to 7.4.
  */
 export function conformanceProbability(reading: number, allowed: Limits, standardUncertainty: number): number {
   if (!Number.isFinite(reading)) throw new ArithmeticError('measure_not_a_number', { value: String(reading) });

@@ -14,8 +14,7 @@ export interface PlausibilityDoubt {
 /** Slips that happen: a prefix (1000, a million), or a decimal mark one or two places off. */
 const slips = ['1000', '0.001', '1000000', '0.000001', '10', '0.1', '100', '0.01'];
 
-/** How far, as a ratio, a reading may lie from what is usual before it is doubted, and after correction be accepted. */
-const doubtfulFrom = 5;
+/** How far, as a ratio, a corrected reading may lie from what is usual; the reading itself is then at least five off. */
 const credibleTo = 2;
 
 /**
@@ -27,7 +26,7 @@ const credibleTo = 2;
  * @param usual what such readings usually are, for example the median of earlier ones; if left out, the middle of two
  *   limits or the single limit
  * @returns the doubt, or nothing
- * Source: common practice, no source.
+ * @source common practice, no source.
  */
 export function doubtReading(reading: Decimal, allowed: Limits, usual?: Decimal): PlausibilityDoubt | undefined {
   const expected = usual ?? middle(allowed);
@@ -38,8 +37,6 @@ export function doubtReading(reading: Decimal, allowed: Limits, usual?: Decimal)
     const onlyTheSign = ratio(turned, expected).lessThanOrEqualTo(credibleTo) && isWithin(turned, allowed);
     return onlyTheSign ? { kind: 'sign', factor: new Decimal(-1), suggestion: turned } : undefined;
   }
-  const before = ratio(reading, expected);
-  if (before.lessThan(doubtfulFrom)) return undefined;
   const doubts = slips
     .map((slip): PlausibilityDoubt => ({ kind: 'factor', factor: new Decimal(slip), suggestion: reading.times(slip) }))
     .filter(({ suggestion }) => ratio(suggestion, expected).lessThanOrEqualTo(credibleTo))

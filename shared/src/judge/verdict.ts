@@ -19,7 +19,7 @@ export interface Judgement {
 /**
  * What is compared with the limits: the value as it was read (the absolute method), or the value rounded to the places
  * of the limits (the rounding method).
- * Source: ASTM E29-13, sections 5 and 6; from memory.
+ * @source ASTM E29-13, sections 5 and 6; from memory.
  */
 export type Comparison = 'as-read' | 'rounded';
 

@@ -43,7 +43,7 @@ export interface ExpectedWeight {
  * @param rule scale and false alarms
  * @returns mean, spread and limits
  * @throws ArithmeticError `kit_empty`, `kit_pieces`, `kit_weight`, `kit_spread`, `kit_scale`, `kit_share`
- * Source: variances of independent pieces add, the uncertainty of a shared mean adds linearly (JCGM 100:2008, 5.1 and
+ * @source variances of independent pieces add, the uncertainty of a shared mean adds linearly (JCGM 100:2008, 5.1 and
  *   5.2); the normal distribution is presumed.
  */
 export function expectedWeight(lines: readonly KitLine[], rule: WeighingRule): ExpectedWeight {

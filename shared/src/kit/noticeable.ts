@@ -17,7 +17,7 @@ export interface Omission {
  * @returns one answer per line, in order; a piece counts as noticeable if its weight is at least the spread times the
  *   sum of both reaches, which is on the safe side: the probability is then at least the confidence
  * @throws ArithmeticError as `expectedWeight`
- * Source: power of a one-sided test against a shift; JCGM 106:2012, 9.5 gives the same form for risks.
+ * @source power of a one-sided test against a shift; JCGM 106:2012, 9.5 gives the same form for risks.
  */
 export function omissions(lines: readonly KitLine[], rule: WeighingRule): readonly Omission[] {
   const { spreadGrams } = expectedWeight(lines, rule);

@@ -31,7 +31,7 @@ export interface WeighingPlan {
  * @param rule scale, false alarms and wanted confidence
  * @returns groups to weigh, and what must be counted by hand; for a given input always the same
  * @throws ArithmeticError as `expectedWeight`
- * Source: a form of bin packing in which the lightest piece of a bin sets its room; the search is our own.
+ * @source a form of bin packing in which the lightest piece of a bin sets its room; the search is our own.
  */
 export function planWeighings(lines: readonly KitLine[], rule: WeighingRule): WeighingPlan {
   const hidden = new Set(unnoticeable(lines, rule));

@@ -121,12 +121,30 @@ describe('a missing piece', () => {
   });
 });
 
+describe('the spread without the missing piece', () => {
+  it('is the smaller one', () => {
+    // Two pieces of 1 g ± 0.3 g: 0.4272 g with both, 0.3041 g with one; the alarm lies 2.5758 × 0.4272 below 2 g.
+    const [omission] = omissions([line('a', 2, 1, 0.3)], rule);
+    // Φ((1 − 1.1004) / 0.3041) = Φ(−0.330), from a table of the normal distribution.
+    expect(omission?.probability).toBeCloseTo(0.3707, 3);
+  });
+});
+
 describe('grouping into the fewest weighings', () => {
   const item = (size: number, room: number): GroupItem => ({ size, room });
 
   it('needs none for nothing and one for what fits together', () => {
     expect(fewestGroups([])).toEqual({ groups: [], proven: true });
     expect(fewestGroups([item(1, 3), item(2, 9)])).toMatchObject({ proven: true, groups: [expect.any(Array)] });
+  });
+
+  it('does better than putting each where it first fits', () => {
+    const found = fewestGroups([4, 4, 3, 3, 3, 3].map((size) => item(size, 10)));
+    expect(found.proven).toBe(true);
+    expect(found.groups.map((group) => group.map(({ size }) => size))).toEqual([
+      [4, 3, 3],
+      [4, 3, 3],
+    ]);
   });
 
   it('agrees with trying every grouping', () => {

@@ -29,7 +29,7 @@ export interface WeighCheck {
  * @param rule scale and false alarms
  * @returns verdict, and which single missing or surplus piece would explain a wrong weight
  * @throws ArithmeticError `kit_reading`, and as `expectedWeight`
- * Source: the test is two-sided at the rule's share of false alarms; common practice, no source.
+ * @source the test is two-sided at the rule's share of false alarms; common practice, no source.
  */
 export function weighCheck(grams: number, lines: readonly KitLine[], rule: WeighingRule): WeighCheck {
   if (!Number.isFinite(grams)) throw new ArithmeticError('kit_reading', { grams: String(grams) });

@@ -19,7 +19,7 @@ const mostSteps = 200_000;
  *
  * @param items each of which fits alone
  * @returns groups of the items, in a fixed order; `proven` is false only if the search had to stop early
- * Source: bin packing by first fit and branch and bound (Martello and Toth, Knapsack Problems, 1990, chapter 8), with
+ * @source bin packing by first fit and branch and bound (Martello and Toth, Knapsack Problems, 1990, chapter 8), with
  *   room that depends on the members; the bound for each level of room is our own.
  */
 export function fewestGroups<T extends GroupItem>(items: readonly T[]): Grouping<T> {

@@ -21,7 +21,7 @@ const exponents = (given: Partial<Exponents>): Exponents => ({
 /**
  * What can be measured. Two units convert into each other if they share one of these; frequency and a count per time,
  * or energy and torque, stay apart although their exponents agree.
- * Source: The International System of Units (SI brochure), 9th edition, 2019, tables 2 to 6.
+ * @source The International System of Units (SI brochure), 9th edition, 2019, tables 2 to 6.
  */
 export const dimensions = {
   count: exponents({ count: 1 }),

@@ -6,7 +6,7 @@ export type EnamelGrade = 1 | 2 | 3;
 
 /**
  * Nominal conductor diameter and largest overall diameter in grade 1, 2 and 3, mm.
- * Source: IEC 60317-0-1:2013, table 1, from memory.
+ * @source IEC 60317-0-1:2013, table 1, from memory.
  */
 const overallDiameters: readonly (readonly [string, string, string, string])[] = [
   ['0.050', '0.060', '0.066', '0.070'],
@@ -66,7 +66,7 @@ export interface EnamelledDiameter {
  * @param grade 1, 2 or 3
  * @returns mm; between two diameters of the table with the enamel of the thicker one
  * @throws ArithmeticError `measure_enamel_range`; `measure_not_a_number`, `measure_not_exact`
- * Source: IEC 60317-0-1:2013, table 1 and 4.3, from memory.
+ * @source IEC 60317-0-1:2013, table 1 and 4.3, from memory.
  */
 export function enamelledDiameter(diameterMillimetres: DecimalInput, grade: EnamelGrade): EnamelledDiameter {
   const diameter = decimal(diameterMillimetres);

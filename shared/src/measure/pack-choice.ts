@@ -36,7 +36,7 @@ const largestTable = 2_000_000;
  * @throws ArithmeticError `measure_pack_size`, `measure_pack_price`, `measure_packs_too_fine` when sizes such as 1 and
  *   1.000001 would need a table of more than 2,000,000 steps; `money_too_large`; `measure_not_a_number`,
  *   `measure_not_exact`
- * Source: covering form of the unbounded knapsack problem; the exchange argument is the pigeonhole principle.
+ * @source covering form of the unbounded knapsack problem; the exchange argument is the pigeonhole principle.
  */
 export function cheapestPacks(need: DecimalInput, packs: readonly Pack[]): PackChoice {
   const wanted = decimal(need);

@@ -20,7 +20,7 @@ const pi = new Decimal('3.14159265358979323846264338327950288419716939937511');
  * @param wire the wire
  * @returns mm²
  * @throws ArithmeticError `measure_wire_size`; `measure_not_a_number`, `measure_not_exact`
- * Source: geometry, n π d² / 4.
+ * @source geometry, n π d² / 4.
  */
 export function crossSection(wire: Wire): Decimal {
   const diameter = decimal(wire.diameterMillimetres);
@@ -36,7 +36,7 @@ export function crossSection(wire: Wire): Decimal {
  * @param wire the wire
  * @returns grams per metre
  * @throws ArithmeticError as {@link crossSection}
- * Source: density × area; copper 8.89 g/cm³ by IEC 60028:1925. Makers reckon with up to 8.96, and enamel adds some
+ * @source density × area; copper 8.89 g/cm³ by IEC 60028:1925. Makers reckon with up to 8.96, and enamel adds some
  *   percent in fine wire; a reel that is weighed differs by that much.
  */
 export function gramsPerMetre(wire: Wire): Decimal {
@@ -75,7 +75,7 @@ export function gramsOfLength(metres: DecimalInput, wire: Wire): Decimal {
  * @param celsius temperature, °C
  * @returns Ω per metre
  * @throws ArithmeticError `measure_not_a_number` for a temperature outside the straight line; as {@link crossSection}
- * Source: resistivity ÷ area; copper 1/58 Ω·mm²/m at 20 °C by IEC 60028:1925.
+ * @source resistivity ÷ area; copper 1/58 Ω·mm²/m at 20 °C by IEC 60028:1925.
  */
 export function ohmsPerMetre(wire: Wire, celsius: number): number {
   return resistivityAt(wire.material, celsius) / crossSection(wire).toNumber();
@@ -112,7 +112,7 @@ export function equalSingleDiameter(wire: Wire): Decimal {
  * @param wire strands
  * @returns mm, n d
  * @throws ArithmeticError as {@link crossSection}
- * Source: common practice, no source.
+ * @source common practice, no source.
  */
 export function addedDiameters(wire: Wire): Decimal {
   crossSection(wire);
@@ -137,7 +137,7 @@ export function strandsForArea(squareMillimetres: DecimalInput, wire: Omit<Wire,
  *
  * @param gauge from −3 (written 4/0) to 50
  * @returns bare diameter, mm
- * Source: ASTM B258-18: 0.127 mm × 92^((36 − n) / 39).
+ * @source ASTM B258-18: 0.127 mm × 92^((36 − n) / 39).
  */
 export function gaugeDiameter(gauge: number): number {
   return 0.127 * 92 ** ((36 - gauge) / 39);

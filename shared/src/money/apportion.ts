@@ -12,7 +12,7 @@ import { minorAmountOf, type MinorAmount } from './minor-units.js';
  * @returns minor units per share, in the order of the weights; each less than one unit from its exact share
  * @throws ArithmeticError `money_weight_negative`; `money_no_weight` if something is to be spread over nothing;
  *   `measure_not_a_number`, `measure_not_exact`
- * Source: largest remainder method (Hamilton, Hare).
+ * @source largest remainder method (Hamilton, Hare).
  */
 export function apportion(total: MinorAmount, weights: readonly DecimalInput[]): readonly MinorAmount[] {
   weights.forEach((weight, index) => {

@@ -40,7 +40,7 @@ export interface Conversion {
  * @param rule day, oldest rate in days, rounding
  * @returns the amount in `to`, rounded once, and the rate used; of two rates of one day the direct one
  * @throws ArithmeticError `money_no_rate`, `money_rate_too_old`, `money_rate_not_positive`, `money_too_large`
- * Source: Council Regulation (EC) No 1103/97, article 4 (no rounding of rates, no inverse rates), from memory.
+ * @source Council Regulation (EC) No 1103/97, article 4 (no rounding of rates, no inverse rates), from memory.
  */
 export function convertMoney(
   money: Money,

@@ -22,7 +22,7 @@ export interface PricedQuantity {
  * @returns minor units, before allowances and charges of the line
  * @throws ArithmeticError `money_division_by_zero` for a price base of zero; `money_too_large`; `measure_not_a_number`,
  *   `measure_not_exact`
- * Source: EN 16931-1:2017, BT-131, BT-129, BT-146, BT-149.
+ * @source EN 16931-1:2017, BT-131, BT-129, BT-146, BT-149.
  */
 export function lineAmount(line: PricedQuantity, currency: CurrencyCode, mode: RoundingMode = 'half-up'): MinorAmount {
   const scale = new Decimal(10).pow(currencyExponent(currency));

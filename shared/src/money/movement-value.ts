@@ -60,7 +60,7 @@ export function receiveIntoPool(pool: CostPool, quantity: DecimalInput, value: M
  * @param mode the way to round the share; `half-even` so that many issues do not drift
  * @returns the movement's value (zero or negative) and the pool after it
  * @throws ArithmeticError `money_quantity_not_positive`, `money_more_than_held`
- * Source: IAS 2, paragraphs 25 and 27 (weighted average); the remainder rule is common practice, no source.
+ * @source IAS 2, paragraphs 25 and 27 (weighted average); the remainder rule is common practice, no source.
  */
 export function issueFromPool(pool: CostPool, quantity: DecimalInput, mode: RoundingMode = 'half-even'): PoolMovement {
   const issued = positive(quantity);
@@ -68,10 +68,9 @@ export function issueFromPool(pool: CostPool, quantity: DecimalInput, mode: Roun
     throw new ArithmeticError('money_more_than_held', { asked: issued.toFixed(), held: pool.quantity.toFixed() });
   }
   const left = pool.quantity.minus(issued);
-  const { integers } = onCommonScale([issued, pool.quantity]);
-  const value = left.isZero()
-    ? pool.value
-    : minorAmountOf(roundQuotient(BigInt(pool.value) * (integers[0] ?? 0n), integers[1] ?? 1n, mode));
+  // The share is rounded from the exact fraction; what empties the pool is the whole of it and needs no rule of its own.
+  const [part = 0n, whole = 1n] = onCommonScale([issued, pool.quantity]).integers;
+  const value = minorAmountOf(roundQuotient(BigInt(pool.value) * part, whole, mode));
   return {
     value: subtractMinor(zeroAmount, value),
     pool: { quantity: left, value: subtractMinor(pool.value, value) },

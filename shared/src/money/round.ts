@@ -11,7 +11,7 @@ import { Decimal, decimal, type DecimalInput } from '../measure/decimal.js';
  * - `up`, `down`: always away from, always towards zero
  * - `ceiling`, `floor`: always towards plus, always towards minus infinity
  *
- * Source: names in common use; IEEE 754-2019, 4.3 for the directions; half away from zero is what Council Regulation
+ * @source names in common use; IEEE 754-2019, 4.3 for the directions; half away from zero is what Council Regulation
  * (EC) 1103/97, article 5 and commercial practice ask for positive amounts.
  */
 export type RoundingMode =

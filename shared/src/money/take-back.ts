@@ -12,7 +12,7 @@ import { issueFromPool, type CostPool, type PoolMovement } from './movement-valu
  * @param brought value it came with, minor units, not negative
  * @returns the movement's value (zero or negative) and the pool after it
  * @throws ArithmeticError `money_quantity_not_positive`, `money_more_than_held`
- * Source: common practice, no source.
+ * @source common practice, no source.
  */
 export function takeBackFromPool(pool: CostPool, quantity: DecimalInput, brought: MinorAmount): PoolMovement {
   const averaged = issueFromPool(pool, quantity);

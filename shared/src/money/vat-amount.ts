@@ -9,7 +9,7 @@ import { roundQuotient } from './round.js';
  * @param ratePercent percent, for example "23"
  * @returns minor units, rounded half away from zero
  * @throws ArithmeticError `measure_not_a_number`, `measure_not_exact`, `money_too_large`
- * Source: EN 16931-1:2017, BR-CO-17.
+ * @source EN 16931-1:2017, BR-CO-17.
  */
 export function vatOnNet(net: MinorAmount, ratePercent: DecimalInput): MinorAmount {
   const [rate = 0n, hundred = 100n] = onCommonScale([ratePercent, 100]).integers;
@@ -23,7 +23,7 @@ export function vatOnNet(net: MinorAmount, ratePercent: DecimalInput): MinorAmou
  * @param ratePercent percent, more than −100
  * @returns minor units, gross × 100 / (100 + rate) rounded half away from zero; the VAT is the rest
  * @throws ArithmeticError `money_division_by_zero` at −100 percent; `measure_not_a_number`, `measure_not_exact`
- * Source: Directive 2006/112/EC, articles 73 and 78 (the taxable amount leaves out the tax itself).
+ * @source Directive 2006/112/EC, articles 73 and 78 (the taxable amount leaves out the tax itself).
  */
 export function netWithinGross(gross: MinorAmount, ratePercent: DecimalInput): MinorAmount {
   const [rate = 0n, hundred = 100n] = onCommonScale([ratePercent, 100]).integers;

@@ -29,7 +29,7 @@ const rateRule = {
  * @returns the rate, percent
  * @throws ArithmeticError `money_vat_rate_negative`, `money_vat_rate_for_category`; `measure_not_a_number`,
  *   `measure_not_exact`
- * Source: EN 16931-1:2017, rules BR-S-05, BR-Z-05, BR-E-05, BR-AE-05, BR-IC-05, BR-G-05, BR-O-05, BR-IG-05, BR-IP-05.
+ * @source EN 16931-1:2017, rules BR-S-05, BR-Z-05, BR-E-05, BR-AE-05, BR-IC-05, BR-G-05, BR-O-05, BR-IG-05, BR-IP-05.
  */
 export function vatRate(category: VatCategory, ratePercent: DecimalInput): Decimal {
   const rate = decimal(ratePercent);

@@ -33,7 +33,7 @@ export interface BrokenRule {
  * @returns every broken rule, none if the document is sound; `BR-CO-18` stands for a group that is missing or too many,
  *   `BR-S-08` for a taxable amount that is not the sum of its entries, whatever the category
  * @throws ArithmeticError as `totalsFromNet`, if the lines themselves cannot stand together
- * Source: EN 16931-1:2017, rules BR-CO-10 to BR-CO-18, BR-S-08 and its like.
+ * @source EN 16931-1:2017, rules BR-CO-10 to BR-CO-18, BR-S-08 and its like.
  */
 export function brokenTotals(document: VatDocument, claimed: DocumentTotals): readonly BrokenRule[] {
   const right = totalsFromNet(document);

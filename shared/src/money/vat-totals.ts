@@ -69,7 +69,7 @@ export interface DocumentTotals {
  * @returns the totals; VAT is worked out once per category and rate and rounded half away from zero
  * @throws ArithmeticError `money_vat_rate_negative`, `money_vat_rate_for_category`, `money_vat_outside_scope_mixed`,
  *   `money_too_large`
- * Source: EN 16931-1:2017, rules BR-CO-10 to BR-CO-17, BR-S-08 and its like for the other categories, BR-O-11 to 14.
+ * @source EN 16931-1:2017, rules BR-CO-10 to BR-CO-17, BR-S-08 and its like for the other categories, BR-O-11 to 14.
  *   The standard names no rule for ties; half away from zero reproduces its sample invoices.
  */
 export function totalsFromNet(document: VatDocument): DocumentTotals {
@@ -105,7 +105,7 @@ export interface GrossDocumentTotals extends DocumentTotals {
  * @param settlement what to do where no net amount gives back the gross one
  * @returns the totals with `payable + prepaid` = the gross sum (plus the document's own rounding), and each entry's net
  * @throws ArithmeticError as {@link totalsFromNet}
- * Source: EN 16931-1:2017 as for net; net = gross × 100 / (100 + rate), Directive 2006/112/EC, articles 73 and 78.
+ * @source EN 16931-1:2017 as for net; net = gross × 100 / (100 + rate), Directive 2006/112/EC, articles 73 and 78.
  */
 export function totalsFromGross(
   document: VatDocument,

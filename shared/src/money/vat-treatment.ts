@@ -68,7 +68,7 @@ export type VatTreatment =
  * @param rules dated rates, countries, special places, the shop's home and elections
  * @returns category, rate and reason, or the question that is open
  * @throws ArithmeticError `measure_not_a_number`, `measure_not_exact` for a rate row that holds no decimal
- * Source: Directive 2006/112/EC: articles 31 and 32 (goods not sent, or sent from here), 33(a) and 59c (distance sales
+ * @source Directive 2006/112/EC: articles 31 and 32 (goods not sent, or sent from here), 33(a) and 59c (distance sales
  *   and their threshold), 138 (intra-Community supply), 146 (export), 369a to 369j (one-stop shop); Implementing
  *   Regulation (EU) 282/2011, article 45a (proof of transport). From memory.
  */
@@ -92,7 +92,7 @@ export function vatTreatment(supply: VatSupply, rules: VatRules): VatTreatment {
  * @param rules as for {@link vatTreatment}
  * @returns the home rate, or the question that is open
  * @throws ArithmeticError as {@link vatTreatment}
- * Source: Directive 2006/112/EC, article 31.
+ * @source Directive 2006/112/EC, article 31.
  */
 export function vatTreatmentAtShop(supply: Pick<VatSupply, 'day' | 'rateClass'>, rules: VatRules): VatTreatment {
   return rated('home', rules.home, supply, rules, 'fetched_at_home');

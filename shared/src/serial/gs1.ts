@@ -7,7 +7,7 @@ import { ArithmeticError } from '../errors/arithmetic-error.js';
  * @param payload the digits before the check digit
  * @returns one digit: weights 3, 1, 3 … from the right, filled up to the next ten
  * @throws ArithmeticError `serial_gs1_unreadable` for anything but digits
- * Source: GS1 General Specifications, section 7.9 (check digit calculations).
+ * @source GS1 General Specifications, section 7.9 (check digit calculations).
  */
 export function gs1CheckDigit(payload: string): string {
   if (!/^\d+$/.test(payload)) throw new ArithmeticError('serial_gs1_unreadable', { text: payload });

@@ -50,7 +50,7 @@ export interface ReadIban {
  * @returns the account number in its electronic form
  * @throws ArithmeticError `serial_iban_unreadable`, `serial_iban_country`, `serial_iban_length`,
  *   `serial_iban_check_digits`
- * Source: ISO 13616-1:2020; ISO/IEC 7064:2003, MOD 97-10.
+ * @source ISO 13616-1:2020; ISO/IEC 7064:2003, MOD 97-10.
  */
 export function readIban(typed: string): ReadIban {
   const text = typed.replace(/\s/g, '').toUpperCase();

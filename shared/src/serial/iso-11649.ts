@@ -7,7 +7,7 @@ import { mod97CheckDigits, remainderBy97 } from './mod-97-10.js';
  * @param reference 1 to 21 digits and letters, for example the invoice's number without signs
  * @returns the reference in its electronic form, for example "RF18539007547034"
  * @throws ArithmeticError `serial_reference_unreadable`
- * Source: ISO 11649:2009; MOD 97-10 over the reference with RF00 moved behind it.
+ * @source ISO 11649:2009; MOD 97-10 over the reference with RF00 moved behind it.
  */
 export function creditorReference(reference: string): string {
   const payload = reference.toUpperCase();

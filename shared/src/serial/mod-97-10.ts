@@ -6,7 +6,7 @@ import { ArithmeticError } from '../errors/arithmetic-error.js';
  * @param text digits and capital letters, any length
  * @returns 0 to 96; 0 for empty text
  * @throws ArithmeticError `serial_not_digits`
- * Source: ISO/IEC 7064:2003, MOD 97-10; letters as in ISO 13616 and ISO 11649.
+ * @source ISO/IEC 7064:2003, MOD 97-10; letters as in ISO 13616 and ISO 11649.
  */
 export function remainderBy97(text: string): number {
   let remainder = 0;
@@ -23,7 +23,7 @@ export function remainderBy97(text: string): number {
  * @param payload digits and capital letters
  * @returns "02" to "98", the range that ISO 13616 asks for (00 and 01 would leave the same remainder as 97 and 98)
  * @throws ArithmeticError `serial_not_digits`
- * Source: ISO/IEC 7064:2003, MOD 97-10.
+ * @source ISO/IEC 7064:2003, MOD 97-10.
  */
 export function mod97CheckDigits(payload: string): string {
   return String(98 - ((remainderBy97(payload) * 100) % 97)).padStart(2, '0');
@@ -38,7 +38,7 @@ export function mod97CheckDigits(payload: string): string {
  *
  * @param text payload and two check digits
  * @returns true if they belong together; false also for text that cannot be read
- * Source: ISO/IEC 7064:2003, MOD 97-10.
+ * @source ISO/IEC 7064:2003, MOD 97-10.
  */
 export function hasMod97CheckDigits(text: string): boolean {
   return /^[0-9A-Z]+\d{2}$/.test(text) && mod97CheckDigits(text.slice(0, -2)) === text.slice(-2);

@@ -96,7 +96,7 @@ export interface ReadVatNumber {
  * @returns the number in its one written form
  * @throws ArithmeticError `serial_vat_unreadable`, `serial_vat_country` for a prefix outside, `serial_vat_number` if
  *   the digits do not fit
- * Source: structures as published by the European Commission (VIES); check digits as in the library jsvat and, for BE,
+ * @source structures as published by the European Commission (VIES); check digits as in the library jsvat and, for BE,
  *   FR and NL, beside each function.
  */
 export function readVatNumber(typed: string): ReadVatNumber {
