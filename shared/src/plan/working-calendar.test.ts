@@ -1,7 +1,8 @@
 import { describe, expect, it } from '@jest/globals';
 import fc from 'fast-check';
 import { addDays, dayOfNumber, isoDay } from './iso-day.js';
-import { addWorkingDays, isoWeekday, isWorkingDay, workingDayFrom, type WorkingCalendar } from './working-calendar.js';
+import { isoWeekday } from './iso-week.js';
+import { addWorkingDays, isWorkingDay, workingDayFrom, type WorkingCalendar } from './working-calendar.js';
 
 const calendar: WorkingCalendar = {
   weekdays: [1, 2, 3, 4, 5],

@@ -1,5 +1,6 @@
 import { ArithmeticError } from '../errors/arithmetic-error.js';
-import { addDays, dayNumber, type IsoDay } from './iso-day.js';
+import { addDays, type IsoDay } from './iso-day.js';
+import { isoWeekday } from './iso-week.js';
 
 /** The days on which a shop works. */
 export interface WorkingCalendar {
@@ -11,17 +12,6 @@ export interface WorkingCalendar {
 
 /** Longer than any run of closed days a shop has; past it a calendar is taken to be wrong. */
 const longestClosure = 366;
-
-/**
- * The ISO weekday of a day.
- *
- * @param day the day
- * @returns 1 for Monday to 7 for Sunday
- * Source: ISO 8601-1:2019, 3.1.2.8; 1970-01-01 was a Thursday.
- */
-export function isoWeekday(day: IsoDay): number {
-  return ((((dayNumber(day) + 3) % 7) + 7) % 7) + 1;
-}
 
 /**
  * Whether a day is worked.
