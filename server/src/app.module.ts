@@ -1,4 +1,8 @@
 import { Module } from '@nestjs/common';
+import { CatalogueModule } from './catalogue/catalogue.module.js';
+import { OrdersModule } from './orders/orders.module.js';
+import { PaymentsModule } from './payments/payments.module.js';
+import { BuildsModule } from './builds/builds.module.js';
 import { BillsModule } from './bills/bills.module.js';
 import { InvoicingModule } from './invoicing/invoicing.module.js';
 import { JournalModule } from './journal/journal.module.js';
@@ -24,7 +28,11 @@ import { SuppliersModule } from './suppliers/suppliers.module.js';
     JournalModule,
     InvoicingModule,
     // Making
+    BuildsModule,
     // Selling and after
+    CatalogueModule,
+    OrdersModule,
+    PaymentsModule,
     // For the accountant
   ],
 })

@@ -645,6 +645,23 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/payment-events': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Called by the payments service; its signature over the raw bytes is what lets it in. */
+    post: operations['Payments_receive'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/profile': {
     parameters: {
       query?: never;
@@ -1543,7 +1560,7 @@ export interface components {
       quantity: string;
       receivedOn: string | null;
       /** @enum {string} */
-      status: 'released' | 'held' | 'rejected';
+      status: 'held' | 'released' | 'rejected';
       statusChanges: components['schemas']['LotStatusChangeDto'][];
       supplier: string | null;
       supplierLot: string | null;
@@ -1564,7 +1581,7 @@ export interface components {
       quantity: string;
       receivedOn: string | null;
       /** @enum {string} */
-      status: 'released' | 'held' | 'rejected';
+      status: 'held' | 'released' | 'rejected';
       supplier: string | null;
       supplierLot: string | null;
     };
@@ -3679,6 +3696,32 @@ export interface operations {
     };
     responses: {
       202: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Payments_receive: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
         headers: {
           [name: string]: unknown;
         };

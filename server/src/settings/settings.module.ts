@@ -9,6 +9,9 @@ import { ShopSettingsService } from './shop-settings.service.js';
 import { TaxSettingsController } from './tax-settings.controller.js';
 import { TaxSettingsRepository } from './tax-settings.repository.js';
 import { TaxSettingsService } from './tax-settings.service.js';
+import { VatRulesRepository } from './vat-rules.repository.js';
+import { VatRulesService } from './vat-rules.service.js';
+import { WorkingCalendarService } from './working-calendar.service.js';
 
 @Module({
   controllers: [ShopController, TaxSettingsController],
@@ -19,8 +22,11 @@ import { TaxSettingsService } from './tax-settings.service.js';
     ShopSettingsService,
     TaxSettingsRepository,
     TaxSettingsService,
+    VatRulesRepository,
+    VatRulesService,
+    WorkingCalendarService,
   ],
-  exports: [ShopService],
+  exports: [ShopService, VatRulesService, WorkingCalendarService],
 })
 export class SettingsModule {
   constructor(sentences: ConstraintSentences) {

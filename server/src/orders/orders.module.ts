@@ -1,0 +1,16 @@
+import { Module } from '@nestjs/common';
+import { CatalogueModule } from '../catalogue/catalogue.module.js';
+import { SettingsModule } from '../settings/settings.module.js';
+import { StockModule } from '../stock/stock.module.js';
+import { OrderClaimsService } from './order-claims.service.js';
+import { OrderNeedsRepository } from './order-needs.repository.js';
+import { OrdersRepository } from './orders.repository.js';
+import { OrdersService } from './orders.service.js';
+import { PlaceOrderService } from './place-order.service.js';
+
+@Module({
+  imports: [SettingsModule, StockModule, CatalogueModule],
+  providers: [OrderClaimsService, OrderNeedsRepository, OrdersRepository, OrdersService, PlaceOrderService],
+  exports: [OrderClaimsService, OrdersService, PlaceOrderService],
+})
+export class OrdersModule {}
