@@ -8,6 +8,7 @@ import { InvoicingModule } from './invoicing/invoicing.module.js';
 import { JournalModule } from './journal/journal.module.js';
 import { PartsModule } from './parts/parts.module.js';
 import { PeopleModule } from './people/people.module.js';
+import { PlanningModule } from './planning/planning.module.js';
 import { PlatformModule } from './platform/platform.module.js';
 import { SettingsModule } from './settings/settings.module.js';
 import { StockModule } from './stock/stock.module.js';
@@ -29,6 +30,7 @@ import { SuppliersModule } from './suppliers/suppliers.module.js';
     InvoicingModule,
     // Making
     BuildsModule,
+    PlanningModule,
     // Selling and after
     CatalogueModule,
     OrdersModule,

@@ -119,6 +119,40 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/bills/{code}/revisions/{number}/buildable': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** How many could be built now, and what stops the next one. */
+    get: operations['DesignFigures_buildable'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bills/{code}/revisions/{number}/cost': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** What one costs today. */
+    get: operations['DesignFigures_cost'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/bills/{code}/revisions/{number}/discard': {
     parameters: {
       query?: never;
@@ -331,6 +365,23 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/design-queue': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** Drafts that wait for release, and released bills that cannot be built to. */
+    get: operations['DesignFigures_designQueue'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/email-change-completions': {
     parameters: {
       query?: never;
@@ -444,6 +495,41 @@ export interface paths {
     put?: never;
     /** Asks somebody to join the staff, by mail. */
     post: operations['Staff_invite'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/kits': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** Parts that have a contents list. */
+    get: operations['Contents_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/kits/{code}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** What goes into which bag, and what it should weigh. */
+    get: operations['Contents_open'];
+    /** Saves a contents list whole. */
+    put: operations['Contents_edit'];
+    post?: never;
     delete?: never;
     options?: never;
     head?: never;
@@ -1094,6 +1180,18 @@ export interface components {
       testPlan: components['schemas']['CharacteristicChangeDto'][];
       to: number;
     };
+    BillCostDto: {
+      labour: components['schemas']['MoneyDto'];
+      labourPerHour: components['schemas']['MoneyDto'];
+      lines: components['schemas']['CostLineDto'][];
+      material: components['schemas']['MoneyDto'];
+      minutes: string;
+      /** @description Minutes of the bill's own steps, and on all levels. */
+      ownMinutes: string;
+      total: components['schemas']['MoneyDto'];
+      /** @description Parts whose cost is not known and counts as nothing. */
+      unknown: components['schemas']['BillPartDto'][];
+    };
     BillDto: {
       draft: number | null;
       part: components['schemas']['BillPartDto'];
@@ -1247,6 +1345,20 @@ export interface components {
     BinRetireDto: {
       version: number;
     };
+    BuildableDto: {
+      /** @description Of these, one alone would be enough, and how much of it. */
+      aloneEnough: components['schemas']['MissingPartDto'][];
+      /** @description The most that could be possible; equal to `quantity` unless the search was cut short. */
+      atMost: string;
+      made: components['schemas']['MadeOnTheWayDto'][];
+      /** @description Whether less than `stops` would not do. */
+      proven: boolean;
+      /** @description How many can be built now from what is free. */
+      quantity: string;
+      /** @description Everything that is missing for the next one: all of these together let it be built. */
+      stops: components['schemas']['MissingPartDto'][];
+      takes: components['schemas']['TakenPartDto'][];
+    };
     BuildStepDto: {
       caution: string | null;
       instruction: string;
@@ -1331,6 +1443,66 @@ export interface components {
     ComponentListDto: {
       items: components['schemas']['ComponentDto'][];
       total: number;
+    };
+    ContentsBagDto: {
+      bag: string;
+      lines: number;
+      /** @description Codes of the parts in it whose weight is not known. */
+      unweighed: string[];
+      /** @description Sum of the weights that are known. */
+      weightG: string;
+    };
+    ContentsDto: {
+      /** @description In the order in which they first occur. */
+      bags: components['schemas']['ContentsBagDto'][];
+      lines: components['schemas']['ContentsLineDto'][];
+      part: components['schemas']['BillPartDto'];
+      unweighed: string[];
+      /** @description 0 for a list that is not there yet. */
+      version: number;
+      /** @description Expected weight of everything together, as far as weights are known. */
+      weightG: string;
+    };
+    ContentsEditDto: {
+      lines: components['schemas']['ContentsLineInputDto'][];
+      /** @description As read; 0 for a list that is not there yet. */
+      version: number;
+    };
+    ContentsLineDto: {
+      bag: string;
+      /** @description Whether the part has a released bill of its own; otherwise it is bought. */
+      made: boolean;
+      part: components['schemas']['BillPartDto'];
+      position: number;
+      quantity: string;
+      /** @description Of one stock unit. */
+      unitWeightG: string | null;
+      /** @description Of the line. */
+      weightG: string | null;
+    };
+    ContentsLineInputDto: {
+      /** @description Which bag it goes into. */
+      bag: string;
+      part: string;
+      /**
+       * Format: decimal
+       * @example 12.5
+       */
+      quantity: string;
+    };
+    CostLineDto: {
+      amount: components['schemas']['MoneyDto'];
+      /**
+       * @description Where the cost comes from: the average of what lies on the shelf, the last that came in, its own bill, or nowhere.
+       * @enum {string}
+       */
+      basis: 'unknown' | 'average' | 'last' | 'bill';
+      part: components['schemas']['BillPartDto'];
+      position: number;
+      /** @description Of the component, for one made, with its allowance for scrap; in its stock unit. */
+      taken: string;
+      /** @description For one stock unit of the component, in major units with six places. */
+      unitCost: string | null;
     };
     CountriesDto: {
       items: components['schemas']['CountryDto'][];
@@ -1448,6 +1620,24 @@ export interface components {
       items: components['schemas']['DeliveryRateDto'][];
       total: number;
     };
+    DesignQueueDto: {
+      items: components['schemas']['DesignQueueItemDto'][];
+    };
+    DesignQueueItemDto: {
+      /** @description For a draft: what stands against releasing it, a sentence each. */
+      against: string[];
+      /** @enum {string} */
+      kind: 'draft_waiting' | 'component_retired' | 'cannot_build';
+      number: number;
+      part: components['schemas']['BillPartDto'];
+      /** @description Codes of the parts it is about: retired or missing ones. */
+      parts: string[];
+      /**
+       * Format: date-time
+       * @description Since when: the draft was begun or the revision released.
+       */
+      since: string;
+    };
     EmailChangeDto: {
       /** Format: password */
       currentPassword: string;
@@ -1507,6 +1697,20 @@ export interface components {
       /** @enum {string} */
       role: 'owner' | 'assembler' | 'accountant';
     };
+    KitListDto: {
+      items: components['schemas']['KitListItemDto'][];
+      total: number;
+    };
+    KitListItemDto: {
+      bags: number;
+      code: string;
+      lines: number;
+      name: string;
+      retired: boolean;
+      /** @description Parts whose weight is not known. */
+      unweighed: number;
+      weightG: string;
+    };
     KitUseDto: {
       bag: string;
       part: components['schemas']['BillPartDto'];
@@ -1560,7 +1764,7 @@ export interface components {
       quantity: string;
       receivedOn: string | null;
       /** @enum {string} */
-      status: 'held' | 'released' | 'rejected';
+      status: 'released' | 'held' | 'rejected';
       statusChanges: components['schemas']['LotStatusChangeDto'][];
       supplier: string | null;
       supplierLot: string | null;
@@ -1581,7 +1785,7 @@ export interface components {
       quantity: string;
       receivedOn: string | null;
       /** @enum {string} */
-      status: 'held' | 'released' | 'rejected';
+      status: 'released' | 'held' | 'rejected';
       supplier: string | null;
       supplierLot: string | null;
     };
@@ -1609,8 +1813,21 @@ export interface components {
       status: 'held' | 'released' | 'rejected';
       version: number;
     };
+    MadeOnTheWayDto: {
+      part: components['schemas']['BillPartDto'];
+      quantity: string;
+    };
     /** @enum {string} */
     MailState: 'waiting' | 'sent' | 'given_up' | 'uncertain';
+    MissingPartDto: {
+      claimed: string;
+      /** @description How much of it is missing. */
+      missing: string;
+      /** @description What lies on the shelf, what of it may be used, and what of that is promised already. */
+      onShelf: string;
+      part: components['schemas']['BillPartDto'];
+      usable: string;
+    };
     MoneyDto: {
       /** @description In minor units: 1250 is 12.50 in a currency with two decimals. */
       amount: number;
@@ -2136,6 +2353,12 @@ export interface components {
       items: components['schemas']['SupplierItemDto'][];
       total: number;
     };
+    TakenPartDto: {
+      free: string;
+      part: components['schemas']['BillPartDto'];
+      /** @description What building all of them takes from the shelf. */
+      taken: string;
+    };
     TransferInputDto: {
       lines: components['schemas']['TransferLineDto'][];
       note?: string | null;
@@ -2526,6 +2749,68 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['BillRevisionDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  DesignFigures_buildable: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+        number: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildableDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  DesignFigures_cost: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+        number: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BillCostDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */
@@ -3094,6 +3379,34 @@ export interface operations {
       };
     };
   };
+  DesignFigures_designQueue: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['DesignQueueDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   Accounts_completeEmailChange: {
     parameters: {
       query?: never;
@@ -3296,6 +3609,105 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['StaffMemberDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Contents_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['KitListDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Contents_open: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ContentsDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Contents_edit: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ContentsEditDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ContentsDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */

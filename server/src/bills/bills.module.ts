@@ -7,25 +7,30 @@ import { billsConstraints } from './bills.constraints.js';
 import { BillsController } from './bills.controller.js';
 import { BillsRepository } from './bills.repository.js';
 import { BillsService } from './bills.service.js';
+import { ContentsController } from './contents.controller.js';
+import { ContentsRepository } from './contents.repository.js';
+import { ContentsService } from './contents.service.js';
 import { DraftBillsService } from './draft-bills.service.js';
 import { ReleaseBillService } from './release-bill.service.js';
 import { RevisionReader } from './revision-reader.js';
 import { WhereUsedRepository } from './where-used.repository.js';
 
 @Module({
-  controllers: [BillsController],
+  controllers: [BillsController, ContentsController],
   providers: [
     BillContentRepository,
     BillListsRepository,
     BillsRepository,
     BillsService,
     BillViewsService,
+    ContentsRepository,
+    ContentsService,
     DraftBillsService,
     ReleaseBillService,
     RevisionReader,
     WhereUsedRepository,
   ],
-  exports: [BillsService, DraftBillsService, ReleaseBillService],
+  exports: [BillsService, ContentsService, DraftBillsService, ReleaseBillService],
 })
 export class BillsModule {
   constructor(sentences: ConstraintSentences) {

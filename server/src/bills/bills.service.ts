@@ -27,6 +27,13 @@ export class BillsService {
     return revision;
   }
 
+  /** Revisions by their ids, in the order of these; those that do not exist are left out. */
+  async read(handle: Kysely<DB>, revisionIds: readonly number[]): Promise<BillRevision[]> {
+    const revisions = await this.repository.read(handle, revisionIds);
+    const byId = new Map(revisions.map((revision) => [revision.id, revision]));
+    return revisionIds.flatMap((id) => byId.get(id) ?? []);
+  }
+
   /** A revision of a part by its number. @throws AppError `not_found` */
   async getByNumber(handle: Kysely<DB>, code: string, number: number): Promise<BillRevision> {
     const part = await this.part(handle, code);
