@@ -18,8 +18,9 @@ import {
 import { ensureBinaries } from './cluster-binaries.mjs';
 import { withLock } from './lock.mjs';
 
-/** The passwords of the three roles, made once; readable by the one who made them alone. */
-function readSecrets(file) {
+/** The passwords of the three roles, made once and kept beside the data; readable by the one who made them alone. */
+function readSecrets(folder) {
+  const file = `${folder}.json`;
   if (existsSync(file)) return JSON.parse(readFileSync(file, 'utf8'));
   const names = [roles.admin, roles.owner, roles.server];
   const secrets = Object.fromEntries(names.map((name) => [name, randomBytes(18).toString('base64url')]));
@@ -66,8 +67,8 @@ export async function openLastingCluster({ root, report }) {
   // The package makes the account that the folder is lent to.
   ensureBinaries(report);
   return withLock(join(root, '.local/cluster.lock'), async () => {
-    const secrets = readSecrets(join(root, '.local/cluster-secrets.json'));
     const folder = chooseFolder(root, report);
+    const secrets = readSecrets(folder);
     const data = join(folder, 'data');
     const password = secrets[roles.admin];
     const binaries = prepareData(data, password, report);

@@ -14,7 +14,9 @@ import { sumCounts } from './counts.mjs';
 import { givenSeed } from './shuffle.mjs';
 
 const report = (text) => process.stdout.write(`${text}\n`);
-const jest = ['--experimental-vm-modules', '--no-warnings', 'node_modules/jest/bin/jest.js'];
+/** Both cores; a worker that has grown large is replaced, since modules of a finished file stay in its memory. */
+const jestOptions = ['--maxWorkers=2', '--workerIdleMemoryLimit=1GB'];
+const jest = ['--experimental-vm-modules', '--no-warnings', 'node_modules/jest/bin/jest.js', ...jestOptions];
 const playwright = ['node_modules/@playwright/test/cli.js', 'test', '--config', 'e2e/playwright.config.ts'];
 
 let interrupted = false;
@@ -54,8 +56,8 @@ async function runSteps(context) {
   return [check, build, unit, await run('Browser tests', playwright, context)];
 }
 
-async function prepare() {
-  report(`Dependencies: ${await ensureDependencies(report)}`);
+async function prepare(guard) {
+  report(`Dependencies: ${await ensureDependencies(report, guard)}`);
   const chromium = ensureBrowser(report);
   const cluster = await startThrowAwayCluster(report);
   const seed = givenSeed() ?? Math.floor(Math.random() * 1_000_000);
@@ -84,7 +86,7 @@ async function main() {
   });
   let cluster;
   try {
-    const prepared = await prepare();
+    const prepared = await prepare(guard);
     cluster = prepared.cluster;
     const counts = await Promise.race([runSteps({ env: prepared.env, guard, folder }), stopped]);
     return {

@@ -13,11 +13,21 @@ const demoLoader = join(root, 'server/dist/demo/load.js');
 export const logFile = (name) => join(root, '.local/log', `${name}.log`);
 
 /** Runs a program of ours to its end, its output on the terminal. */
-export function runNode(args, env = process.env) {
+export function runNode(args, { guard, env = process.env }) {
   return new Promise((resolve, reject) => {
-    const child = spawn(process.execPath, args, { cwd: root, env, stdio: ['ignore', 'inherit', 'inherit'] });
+    const child = spawn(process.execPath, args, {
+      cwd: root,
+      env,
+      stdio: ['ignore', 'inherit', 'inherit'],
+      detached: true,
+    });
+    const takeBack = child.pid ? guard.entrust({ process: child.pid }) : () => {};
     child.once('error', reject);
-    child.once('exit', (code) => (code === 0 ? resolve() : reject(new Error(`${args[0]} failed.`))));
+    child.once('exit', (code) => {
+      takeBack();
+      if (code === 0) resolve();
+      else reject(new Error(`${args[0]} failed.`));
+    });
   });
 }
 
@@ -47,10 +57,10 @@ export async function startServer({ env, guard, options = [] }) {
   return server;
 }
 
-export async function loadDemo(serverUrl, settings) {
+export async function loadDemo(serverUrl, { env, guard }) {
   if (!existsSync(demoLoader)) return remark('this version has no demo yet');
   remark('loading the demo: six months of a small shop');
-  await runNode([demoLoader], { ...settings, DATABASE_URL: serverUrl });
+  await runNode([demoLoader], { guard, env: { ...env, DATABASE_URL: serverUrl } });
 }
 
 /** One line a person of the demo. */

@@ -26,23 +26,30 @@ function installedAsLocked() {
   return existsSync(join(root, noted)) && !isStale(readPackages('package-lock.json'), readPackages(noted));
 }
 
-function run(command, args) {
+function install(guard) {
+  const args = ['ci', '--no-audit', '--no-fund', '--no-progress', '--prefer-offline'];
   return new Promise((resolve, reject) => {
-    const child = spawn(command, args, { cwd: root, stdio: ['ignore', 'pipe', 'pipe'] });
+    const child = spawn('npm', args, { cwd: root, stdio: ['ignore', 'pipe', 'pipe'], detached: true });
+    const takeBack = child.pid ? guard.entrust({ process: child.pid }) : () => {};
     let output = '';
     for (const stream of [child.stdout, child.stderr]) stream.on('data', (chunk) => (output += chunk));
     child.once('error', reject);
-    child.once('close', (code) => (code === 0 ? resolve() : reject(new Error(`${command} failed:\n${output.trim()}`))));
+    child.once('close', (code) => {
+      takeBack();
+      if (code === 0) resolve();
+      else reject(new Error(`npm ci failed:\n${output.trim()}`));
+    });
   });
 }
 
 /**
  * @param {(text: string) => void} report
+ * @param {import('../../db/scripts/guard.mjs').Guard} guard ends the installation should this process end first
  * @returns {Promise<string>} the outcome in words
  */
-export async function ensureDependencies(report) {
+export async function ensureDependencies(report, guard) {
   if (installedAsLocked()) return 'up to date';
   report('installing the dependencies (about a minute)');
-  await run('npm', ['ci', '--no-audit', '--no-fund', '--no-progress', '--prefer-offline']);
+  await install(guard);
   return 'installed';
 }

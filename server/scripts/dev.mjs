@@ -38,16 +38,16 @@ async function startVite({ port, ports, guard }) {
 }
 
 async function bringUp(guard) {
-  await step('Dependencies', () => ensureDependencies(remark));
+  await step('Dependencies', () => ensureDependencies(remark, guard));
   const database = await step('Database server', () => openDatabase({ report: remark, guard }));
-  await step('Build', () => runNode([join(root, 'server/scripts/build.mjs'), '--node-only']));
+  await step('Build', () => runNode([join(root, 'server/scripts/build.mjs'), '--node-only'], { guard }));
   const ports = await choosePorts();
   const secrets = localSecrets();
   const page = await freePort(5173);
   const baseUrl = `http://127.0.0.1:${page}`;
   const env = serverEnvironment({ ports, secrets, databaseUrl: database.serverUrl, baseUrl });
   const fakes = await step('Payments and mail stand-ins', () => startFakes({ ports, secrets, guard }));
-  await step('Database', () => database.prepare((url) => loadDemo(url, env)).then(() => 'ready'));
+  await step('Database', () => database.prepare((url) => loadDemo(url, { env, guard })).then(() => 'ready'));
   const compiler = startCompiler(guard);
   const server = await step('Server', () =>
     startServer({ env, guard, options: ['--watch', '--watch-preserve-output'] }),

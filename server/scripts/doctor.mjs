@@ -18,7 +18,7 @@ function runNode(args, env = process.env) {
 }
 
 async function examine(guard) {
-  await ensureDependencies(report);
+  await ensureDependencies(report, guard);
   const built = await runNode([join(root, 'server/scripts/build.mjs'), '--node-only']);
   if (built !== 0) return built;
   const { serverUrl } = await openDatabase({ report, guard });

@@ -71,17 +71,17 @@ async function showAddresses({ env, ports, secrets, empty }) {
 }
 
 async function bringUp(options, guard) {
-  await step('Dependencies', () => ensureDependencies(remark));
+  await step('Dependencies', () => ensureDependencies(remark, guard));
   const database = await step('Database server', () => openDatabase({ report: remark, guard }));
   remark(database.description);
-  await step('Build', () => runNode([join(root, 'server/scripts/build.mjs')]));
+  await step('Build', () => runNode([join(root, 'server/scripts/build.mjs')], { guard }));
   if (options.reset) await step('Deleting the old data', () => deleteData(database));
   const ports = await choosePorts(options.port);
   const secrets = localSecrets();
   const env = serverEnvironment({ ports, secrets, databaseUrl: database.serverUrl });
   const fakes = await step('Payments and mail stand-ins', () => startFakes({ ports, secrets, guard }));
   await step('Database', async () => {
-    const applied = await database.prepare(options.empty ? undefined : (url) => loadDemo(url, env));
+    const applied = await database.prepare(options.empty ? undefined : (url) => loadDemo(url, { env, guard }));
     return applied === 0 ? 'up to date' : `${applied} migrations applied`;
   });
   const server = await step('Server', () => startServer({ env, guard }));
