@@ -39,8 +39,8 @@ const pairings: readonly ((line: BillLine) => string)[] = [
   (line) => line.position,
 ];
 
-/** Later line → the earlier line that it continues. */
-function pairLines(before: readonly BillLine[], after: readonly BillLine[]): Map<BillLine, BillLine> {
+/** Which earlier line each later line continues, by the rule of `compareBills`. Later line → earlier line. */
+export function pairLines(before: readonly BillLine[], after: readonly BillLine[]): Map<BillLine, BillLine> {
   const pairs = new Map<BillLine, BillLine>();
   for (const keyOf of pairings) {
     const used = new Set(pairs.values());

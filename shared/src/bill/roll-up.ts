@@ -12,13 +12,16 @@ export interface RollUpQuestion {
   readonly minutes: (part: PartKey) => DecimalInput;
   /** Major units per hour of work. */
   readonly labourPerHour: DecimalInput;
+  /** Major units of overhead per hour of work, on top of labour; none by default. */
+  readonly overheadPerHour?: DecimalInput;
 }
 
 /** What one stock unit costs, not rounded, major units. */
 export interface RolledUpCost {
   readonly material: Decimal;
   readonly labour: Decimal;
-  /** Material and labour together. */
+  readonly overhead: Decimal;
+  /** Material, labour and overhead together. */
   readonly total: Decimal;
   /** Minutes of work on all levels. */
   readonly minutes: Decimal;
@@ -46,7 +49,8 @@ function boughtCost({ unitCost }: RollUpQuestion, part: PartKey): RolledUpCost {
   const known = unitCost(part);
   const material = decimal(known ?? 0);
   const nothing = new Decimal(0);
-  return { material, labour: nothing, total: material, minutes: nothing, unknown: known === undefined ? [part] : [] };
+  const unknown = known === undefined ? [part] : [];
+  return { material, labour: nothing, overhead: nothing, total: material, minutes: nothing, unknown };
 }
 
 function madeCost(question: RollUpQuestion, part: PartKey, costs: ReadonlyMap<PartKey, RolledUpCost>): RolledUpCost {
@@ -64,5 +68,6 @@ function madeCost(question: RollUpQuestion, part: PartKey, costs: ReadonlyMap<Pa
     for (const key of cost.unknown) unknown.add(key);
   }
   const labour = minutes.times(question.labourPerHour).div(60);
-  return { material, labour, total: material.plus(labour), minutes, unknown: [...unknown] };
+  const overhead = minutes.times(question.overheadPerHour ?? 0).div(60);
+  return { material, labour, overhead, total: material.plus(labour).plus(overhead), minutes, unknown: [...unknown] };
 }

@@ -9,4 +9,7 @@ export const billFaults = {
   bill_too_many_places: 'The bill of {part} has more than {limit} places and cannot be written out one by one.',
   bill_missing: '{part} has no bill, so it cannot be built.',
   bill_too_large_to_count: 'The quantities of {part} are too large to be counted exactly.',
+  bill_cost_missing: '{part} has no cost.',
+  bill_cost_negative: 'The {what} of {part} is below zero ({value}).',
+  bill_rule_broken: 'The rule on {parameter} ({wanted}) cannot be used.',
 } as const;
