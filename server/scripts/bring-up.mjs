@@ -12,21 +12,24 @@ const demoLoader = join(root, 'server/dist/demo/load.js');
 
 export const logFile = (name) => join(root, '.local/log', `${name}.log`);
 
-/** Runs a program of ours to its end, its output on the terminal. */
-export function runNode(args, { guard, env = process.env }) {
+/**
+ * Runs a program of ours to its end.
+ * @param {string[]} args
+ * @param {{ guard: import('../../db/scripts/guard.mjs').Guard, env?: NodeJS.ProcessEnv, quiet?: boolean }} options
+ *   with `quiet`, what it writes is shown only if it fails; else as it comes
+ */
+export function runNode(args, { guard, env = process.env, quiet = false }) {
   return new Promise((resolve, reject) => {
-    const child = spawn(process.execPath, args, {
-      cwd: root,
-      env,
-      stdio: ['ignore', 'inherit', 'inherit'],
-      detached: true,
-    });
+    const output = quiet ? 'pipe' : 'inherit';
+    const child = spawn(process.execPath, args, { cwd: root, env, stdio: ['ignore', output, output], detached: true });
     const takeBack = child.pid ? guard.entrust({ process: child.pid }) : () => {};
+    let written = '';
+    for (const stream of [child.stdout, child.stderr]) stream?.on('data', (chunk) => (written += chunk));
     child.once('error', reject);
-    child.once('exit', (code) => {
+    child.once('close', (code) => {
       takeBack();
       if (code === 0) resolve();
-      else reject(new Error(`${args[0]} failed.`));
+      else reject(new Error(`${written}${args[0]} failed.`));
     });
   });
 }

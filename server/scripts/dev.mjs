@@ -40,7 +40,7 @@ async function startVite({ port, ports, guard }) {
 async function bringUp(guard) {
   await step('Dependencies', () => ensureDependencies(remark, guard));
   const database = await step('Database server', () => openDatabase({ report: remark, guard }));
-  await step('Build', () => runNode([join(root, 'server/scripts/build.mjs'), '--node-only'], { guard }));
+  await step('Build', () => runNode([join(root, 'server/scripts/build.mjs'), '--node-only'], { guard, quiet: true }));
   const ports = await choosePorts();
   const secrets = localSecrets();
   const page = await freePort(5173);

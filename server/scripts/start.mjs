@@ -74,7 +74,7 @@ async function bringUp(options, guard) {
   await step('Dependencies', () => ensureDependencies(remark, guard));
   const database = await step('Database server', () => openDatabase({ report: remark, guard }));
   remark(database.description);
-  await step('Build', () => runNode([join(root, 'server/scripts/build.mjs')], { guard }));
+  await step('Build', () => runNode([join(root, 'server/scripts/build.mjs')], { guard, quiet: true }));
   if (options.reset) await step('Deleting the old data', () => deleteData(database));
   const ports = await choosePorts(options.port);
   const secrets = localSecrets();
