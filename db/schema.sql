@@ -90,15 +90,16 @@ declare
   touched bigint;
   moved bigint;
   posted bigint;
+  last_id bigint;
+  last_made_by xid;
 begin
   if tg_table_name = 'stock_move' then
     touched := new.document_id;
-    -- A document of many moves is added up once, for its last move of this transaction, whose own check is still to
-    -- come; else opening stock of thousands of lots would be added up thousands of times.
-    if exists (
-      select 1 from stock_move
-      where document_id = touched and id > new.id and xmin = pg_current_xact_id()::xid
-    ) then
+    -- A document of many moves is added up once, for its last move: when this transaction made that one too, its own
+    -- check is still to come. Else opening stock of thousands of lots would be added up thousands of times.
+    select id, xmin into last_id, last_made_by
+      from stock_move where document_id = touched order by document_id desc, id desc limit 1;
+    if last_id <> new.id and last_made_by = pg_current_xact_id()::xid then
       return null;
     end if;
   else

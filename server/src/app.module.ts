@@ -4,6 +4,7 @@ import { OrdersModule } from './orders/orders.module.js';
 import { PaymentsModule } from './payments/payments.module.js';
 import { BuildsModule } from './builds/builds.module.js';
 import { BillsModule } from './bills/bills.module.js';
+import { ImportsModule } from './imports/imports.module.js';
 import { InvoicingModule } from './invoicing/invoicing.module.js';
 import { JournalModule } from './journal/journal.module.js';
 import { PartsModule } from './parts/parts.module.js';
@@ -31,6 +32,7 @@ import { SuppliersModule } from './suppliers/suppliers.module.js';
     // Making
     BuildsModule,
     PlanningModule,
+    ImportsModule,
     // Selling and after
     CatalogueModule,
     OrdersModule,

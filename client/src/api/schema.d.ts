@@ -467,6 +467,88 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/imports': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** Files taken in so far, newest first. */
+    get: operations['Imports_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/imports/{kind}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Imports_apply'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/imports/{kind}/dry-run': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Says what the file would do; changes nothing. */
+    post: operations['Imports_dryRun'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/imports/{kind}/template': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Imports_template'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/imports/kinds': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Imports_listKinds'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/invitation-completions': {
     parameters: {
       query?: never;
@@ -1150,6 +1232,18 @@ export interface components {
       /** @description Cost of one stock unit of what was found, in the shop's currency; left out, the shelf's average counts. */
       unitCost?: string | null;
     };
+    AppliedImportDto: {
+      appliedAt: string;
+      appliedBy: string;
+      /** @description The document that carries what was taken in. */
+      document: string | null;
+      fileName: string;
+      id: number;
+      kind: string;
+      notes: string[];
+      rowCount: number;
+      title: string;
+    };
     AuditEntryDto: {
       action: string;
       actorId: number | null;
@@ -1677,6 +1771,16 @@ export interface components {
       /** @description JSON pointer to the field, such as `/lines/0/quantity`. */
       pointer: string;
     };
+    FileColumnDto: {
+      header: string;
+      /** @description Its place in the file, from 0. */
+      index: number;
+      /** @description The key of the column it fills; null when it is left alone. */
+      key: string | null;
+      /** @description The first value in it. */
+      sample: string;
+      title: string | null;
+    };
     FirstOwnerDto: {
       /** Format: email */
       email: string;
@@ -1689,6 +1793,56 @@ export interface components {
     HealthDto: {
       /** @enum {string} */
       status: 'ok';
+    };
+    ImportCheckDto: {
+      additions: number;
+      columns: components['schemas']['FileColumnDto'][];
+      /** @enum {string|null} */
+      decimalSign: 'point' | 'comma' | null;
+      /** @description All of them are counted; the first thousand are listed. */
+      faultCount: number;
+      faults: components['schemas']['RowFaultDto'][];
+      fileName: string;
+      kind: string;
+      /** @description What would be added, and what is there already. */
+      notes: string[];
+      /** @description Whether it can be applied: no fault, and something to add. */
+      ready: boolean;
+      rowCount: number;
+      /** @description What cuts the file into cells. */
+      separator: string;
+    };
+    ImportColumnDto: {
+      key: string;
+      required: boolean;
+      /** @description What belongs there. */
+      sentence: string;
+      title: string;
+    };
+    ImportKindDto: {
+      columns: components['schemas']['ImportColumnDto'][];
+      kind: string;
+      sentence: string;
+      title: string;
+    };
+    ImportKindsDto: {
+      items: components['schemas']['ImportKindDto'][];
+      total: number;
+    };
+    ImportRunDto: {
+      appliedAt: string;
+      appliedBy: string;
+      /** @description The document that carries what was taken in. */
+      document: string | null;
+      fileName: string;
+      id: number;
+      kind: string;
+      rowCount: number;
+      title: string;
+    };
+    ImportRunPageDto: {
+      items: components['schemas']['ImportRunDto'][];
+      total: number;
     };
     InvitationDto: {
       /** Format: email */
@@ -1764,7 +1918,7 @@ export interface components {
       quantity: string;
       receivedOn: string | null;
       /** @enum {string} */
-      status: 'released' | 'held' | 'rejected';
+      status: 'held' | 'released' | 'rejected';
       statusChanges: components['schemas']['LotStatusChangeDto'][];
       supplier: string | null;
       supplierLot: string | null;
@@ -1785,7 +1939,7 @@ export interface components {
       quantity: string;
       receivedOn: string | null;
       /** @enum {string} */
-      status: 'released' | 'held' | 'rejected';
+      status: 'held' | 'released' | 'rejected';
       supplier: string | null;
       supplierLot: string | null;
     };
@@ -2106,6 +2260,12 @@ export interface components {
     };
     /** @enum {string} */
     Role: 'owner' | 'assembler' | 'accountant' | 'customer';
+    RowFaultDto: {
+      column: string | null;
+      /** @description In the file; the header is line 1. */
+      line: number;
+      sentence: string;
+    };
     SessionDto: {
       /** @description To be sent back in `x-csrf-token` with every change; a new one comes with signing in and out. */
       csrfToken: string;
@@ -3542,6 +3702,182 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['HealthDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Imports_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ImportRunPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Imports_apply: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path: {
+        kind: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'multipart/form-data': {
+          /** @enum {string} */
+          decimalSign?: 'point' | 'comma';
+          /** Format: binary */
+          file: string;
+          mapping?: string;
+        };
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['AppliedImportDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Imports_dryRun: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        kind: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'multipart/form-data': {
+          /** @enum {string} */
+          decimalSign?: 'point' | 'comma';
+          /** Format: binary */
+          file: string;
+          mapping?: string;
+        };
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ImportCheckDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Imports_template: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        kind: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': string;
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Imports_listKinds: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ImportKindsDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */

@@ -63,6 +63,8 @@ export interface ImportKind<Plan = unknown> {
   readonly key: ImportKindKey;
   readonly title: string;
   readonly sentence: string;
+  /** Whether the same file may come again, because what is there already is left alone. */
+  readonly repeatable: boolean;
   readonly columns: readonly ImportColumn[];
   /** A column of the file's own making, such as one per parameter. */
   openColumn?(header: string): ImportColumn | undefined;

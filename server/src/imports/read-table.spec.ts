@@ -10,6 +10,7 @@ const kind: ImportKind<null> = {
   key: 'parts',
   title: 'Parts',
   sentence: 'Parts of the shelf.',
+  repeatable: true,
   columns: [
     {
       key: 'code',

@@ -1,14 +1,16 @@
 import { Module } from '@nestjs/common';
 import { ConstraintSentences } from '../platform/errors/constraints.js';
 import { PartDetailsRepository } from './part-details.repository.js';
+import { PartRegisterRepository } from './part-register.repository.js';
+import { PartRegister } from './part-register.service.js';
 import { PartsController } from './parts.controller.js';
 import { PartsRepository } from './parts.repository.js';
 import { PartsService } from './parts.service.js';
 
 @Module({
   controllers: [PartsController],
-  providers: [PartsService, PartsRepository, PartDetailsRepository],
-  exports: [PartsService],
+  providers: [PartDetailsRepository, PartRegister, PartRegisterRepository, PartsRepository, PartsService],
+  exports: [PartRegister, PartsService],
 })
 export class PartsModule {
   constructor(sentences: ConstraintSentences) {

@@ -60,6 +60,7 @@ export class LotRegister {
     lots: readonly NewLot[],
   ): Promise<readonly RegisteredLot[]> {
     if (lots.length === 0) return [];
+    await this.passOver(trx, lots);
     const unnamed = lots.filter(({ code }) => code === undefined || code === null).length;
     const codes = (await this.nextCodes(trx, unnamed)).values();
     const rows = lots.map((lot): LotRow => {
@@ -69,6 +70,13 @@ export class LotRegister {
     });
     const made = await this.repository.insert(trx, rows, this.clock.now());
     return rows.map(({ code }) => ({ id: lotOf(made, code), code }));
+  }
+
+  /** Lots may bring codes of our own form, from labels printed before: those numbers are then taken. */
+  private async passOver(trx: Transaction<DB>, lots: readonly NewLot[]): Promise<void> {
+    const taken = lots.map(({ code }) => Number(/^L-(\d{1,9})$/.exec(code ?? '')?.[1] ?? 0));
+    const highest = taken.reduce((most, number) => Math.max(most, number), 0);
+    if (highest > 0) await this.numbers.passOver(trx, 'lot', '', highest);
   }
 
   private async nextCodes(trx: Transaction<DB>, count: number): Promise<readonly string[]> {

@@ -64,6 +64,14 @@ export class StockLookupRepository {
       .execute();
   }
 
+  async bins(handle: Kysely<DB>, codes: readonly string[]): Promise<StockBin[]> {
+    return handle
+      .selectFrom('bin')
+      .select(['id', 'code', 'quarantine', 'retired_at as retiredAt'])
+      .where('code', '=', sql<string>`any(${[...codes]}::text[])`)
+      .execute();
+  }
+
   /** Shared, so that a bin is not retired while something is put into it. */
   async lockBins(trx: Transaction<DB>, codes: readonly string[]): Promise<StockBin[]> {
     return trx

@@ -19,6 +19,8 @@ import { LotsRepository } from './lots.repository.js';
 import { LotsService } from './lots.service.js';
 import { MovesRepository } from './moves.repository.js';
 import { MovesService } from './moves.service.js';
+import { OpeningStockRepository } from './opening-stock.repository.js';
+import { OpeningStockService } from './opening-stock.service.js';
 import { ReceiveDeliveryService } from './receive-delivery.service.js';
 import { ReservationsRepository } from './reservations.repository.js';
 import { ReservationsService } from './reservations.service.js';
@@ -50,6 +52,8 @@ import { TransferStockService } from './transfer-stock.service.js';
     LotsService,
     MovesRepository,
     MovesService,
+    OpeningStockRepository,
+    OpeningStockService,
     ReceiveDeliveryService,
     ReservationsRepository,
     ReservationsService,
@@ -61,7 +65,7 @@ import { TransferStockService } from './transfer-stock.service.js';
     StockLookupRepository,
     TransferStockService,
   ],
-  exports: [BinsService, LotRegister, ReservationsService, StockLedgerService, StockLines],
+  exports: [BinsService, LotRegister, OpeningStockService, ReservationsService, StockLedgerService, StockLines],
 })
 export class StockModule {
   constructor(sentences: ConstraintSentences) {

@@ -1,13 +1,14 @@
 import { Module } from '@nestjs/common';
 import { ConstraintSentences } from '../platform/errors/constraints.js';
+import { SupplierRegister } from './supplier-register.service.js';
 import { SuppliersController } from './suppliers.controller.js';
 import { SuppliersRepository } from './suppliers.repository.js';
 import { SuppliersService } from './suppliers.service.js';
 
 @Module({
   controllers: [SuppliersController],
-  providers: [SuppliersService, SuppliersRepository],
-  exports: [SuppliersService],
+  providers: [SupplierRegister, SuppliersService, SuppliersRepository],
+  exports: [SupplierRegister, SuppliersService],
 })
 export class SuppliersModule {
   constructor(sentences: ConstraintSentences) {

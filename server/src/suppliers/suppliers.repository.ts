@@ -123,6 +123,28 @@ export class SuppliersRepository {
     return id;
   }
 
+  async idsByCode(handle: Kysely<DB>, codes: readonly string[]): Promise<ReadonlyMap<string, number>> {
+    const rows = await handle
+      .selectFrom('supplier')
+      .select(['id', 'code'])
+      .where('code', '=', sql<string>`any(${[...codes]}::text[])`)
+      .execute();
+    return new Map(rows.map(({ code, id }) => [code, id]));
+  }
+
+  async insertMany(
+    trx: Transaction<DB>,
+    codes: readonly string[],
+    currency: string,
+    createdAt: Date,
+  ): Promise<ReadonlyMap<string, number>> {
+    const { rows } = await sql<{ id: number; code: string }>`
+      insert into supplier (code, name, currency, created_at)
+      select code, code, ${currency}, ${createdAt} from unnest(${[...codes]}::text[]) as added (code)
+      returning id, code`.execute(trx);
+    return new Map(rows.map(({ code, id }) => [code, id]));
+  }
+
   /** @returns false when somebody else saved a newer version */
   async update(trx: Transaction<DB>, id: number, version: number, row: SupplierRow): Promise<boolean> {
     const result = await trx

@@ -33,4 +33,17 @@ export class Numbers {
       .executeTakeFirstOrThrow();
     return row.last_number - count + 1;
   }
+
+  /** Passes over numbers that came from elsewhere, so that they are not given a second time. */
+  async passOver(trx: Transaction<DB>, series: string, period: string, number: number): Promise<void> {
+    await trx
+      .insertInto('number_series')
+      .values({ series, period, last_number: number })
+      .onConflict((conflict) =>
+        conflict
+          .columns(['series', 'period'])
+          .doUpdateSet({ last_number: sql`greatest(number_series.last_number, ${number})` }),
+      )
+      .execute();
+  }
 }
