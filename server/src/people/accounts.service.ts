@@ -12,7 +12,7 @@ export interface NewAccount {
   readonly passwordHash: string;
 }
 
-/** Accounts that need no mail to be confirmed: the first owner's, and those of the demo. */
+/** What other modules do with accounts: making one that needs no mail to be confirmed, and saying whose orders it sees. */
 @Injectable()
 export class AccountsService {
   constructor(
@@ -20,6 +20,7 @@ export class AccountsService {
     private readonly clock: Clock,
   ) {}
 
+  /** For the first owner, and for the people of the demo. */
   async create(trx: Transaction<DB>, { name, email, role, passwordHash }: NewAccount): Promise<User> {
     const now = this.clock.now();
     return this.users.insert(trx, {
@@ -30,5 +31,14 @@ export class AccountsService {
       createdAt: now,
       confirmed: { passwordHash, at: now },
     });
+  }
+
+  /**
+   * Lets a person see the orders, units and invoices of a customer from now on.
+   *
+   * @returns whether it was done; false when they belong to another customer already, or are staff
+   */
+  async joinCustomer(trx: Transaction<DB>, userId: number, customerId: number): Promise<boolean> {
+    return this.users.setCustomer(trx, userId, customerId);
   }
 }

@@ -1,6 +1,7 @@
 import { randomBytes } from 'node:crypto';
 import { Injectable } from '@nestjs/common';
 import { hash, verify } from '@node-rs/argon2';
+import { AppError } from '../platform/errors/app-error.js';
 
 /**
  * argon2id with 19 MiB, two passes, one lane: the second choice of OWASP's Password Storage Cheat Sheet (2024), which
@@ -12,6 +13,9 @@ const currentPrefix = `$argon2id$v=19$m=${parameters.memoryCost},t=${parameters.
 
 /** Hashes at once; more wait, so that a rush of sign-ins leaves the processor to everybody else. */
 const hashesAtOnce = 1;
+
+/** As many as can be hashed while somebody still waits for the answer. */
+const mostWaiting = 200;
 
 @Injectable()
 export class PasswordHasher {
@@ -41,6 +45,9 @@ export class PasswordHasher {
   }
 
   async #inTurn<Result>(work: () => Promise<Result>): Promise<Result> {
+    if (this.#waiting.length >= mostWaiting) {
+      throw new AppError('service_unavailable', 'Too many people are signing in just now. Try again in a moment.');
+    }
     if (this.#running >= hashesAtOnce) {
       await new Promise<void>((resolve) => {
         this.#waiting.push(resolve);

@@ -135,6 +135,19 @@ export class UsersRepository {
     return row !== undefined;
   }
 
+  /** Only for somebody who buys and belongs to no other customer yet. */
+  async setCustomer(trx: Transaction<DB>, id: number, customerId: number): Promise<boolean> {
+    const row = await trx
+      .updateTable('app_user')
+      .set({ customer_id: customerId })
+      .where('id', '=', id)
+      .where('role', '=', 'customer')
+      .where((where) => where.or([where('customer_id', 'is', null), where('customer_id', '=', customerId)]))
+      .returning('id')
+      .executeTakeFirst();
+    return row !== undefined;
+  }
+
   async rename(trx: Transaction<DB>, id: number, name: string): Promise<void> {
     await trx.updateTable('app_user').set({ name }).where('id', '=', id).execute();
   }

@@ -1,4 +1,4 @@
-import { type CanActivate, type ExecutionContext, Injectable } from '@nestjs/common';
+import { type CanActivate, type ExecutionContext, Injectable, Logger } from '@nestjs/common';
 import { Reflector } from '@nestjs/core';
 import type { Request } from 'express';
 import { Config } from '../config/config.js';
@@ -12,6 +12,8 @@ const safeMethods = new Set(['GET', 'HEAD', 'OPTIONS']);
 /** Refuses a change that another site's page made the browser send: first by the form token, then by where it came from. */
 @Injectable()
 export class FormTokenGuard implements CanActivate {
+  readonly #logger = new Logger('FormToken');
+
   constructor(
     private readonly reflector: Reflector,
     private readonly config: Config,
@@ -24,6 +26,7 @@ export class FormTokenGuard implements CanActivate {
     const site = request.get('sec-fetch-site');
     const foreign = site !== undefined && site !== 'same-origin' && site !== 'none';
     if (foreign || !isOwnOrigin(request.get('origin'), this.config.baseUrl) || !isFormTokenValid(request)) {
+      this.#logger.warn({ event: 'form_refused', requestId: request.id, path: request.path, foreign });
       throw new AppError('stale_form', 'This page is out of date. Load it again; nothing was changed.');
     }
     return true;

@@ -53,11 +53,13 @@ export function sessionMiddleware(parts: SessionParts): RequestHandler[] {
 function endWhenOver(clock: Clock): RequestHandler {
   return (request: Request, _response: Response, next: NextFunction) => {
     const now = clock.now().getTime();
-    if (isSessionOver(request.session, now)) {
+    const { createdAt, passport: person } = request.session;
+    const undated = person !== undefined && createdAt === undefined;
+    if (undated || isSessionOver(request.session, now)) {
       request.session.regenerate((error: unknown) => next(error));
       return;
     }
-    const signedIn = request.session.createdAt !== undefined;
+    const signedIn = createdAt !== undefined;
     if (signedIn && now - (request.session.lastSeenAt ?? 0) >= sessionTimes.grainMilliseconds) {
       request.session.lastSeenAt = now;
     }

@@ -30,6 +30,9 @@ export const appendOnlyTables = [
   'stock_move',
 ] as const;
 
+/** Tables that the server only reads: triggers keep them, or migrations write them. */
+export const readOnlyTables = ['account', 'cost_pool', 'posting_rule', 'stock_balance'] as const;
+
 /** The server must not start: what its database role may do is not what the product promises. */
 export class PrivilegeFault extends Error {
   override readonly name = 'PrivilegeFault';
@@ -38,7 +41,7 @@ export class PrivilegeFault extends Error {
 /** @throws PrivilegeFault when the server's role could rewrite a table that is append-only, or lacks one of them */
 export async function refuseRewritableLedgers(
   database: Database,
-  tables: readonly string[] = appendOnlyTables,
+  tables: readonly string[] = [...appendOnlyTables, ...readOnlyTables],
 ): Promise<void> {
   const { rows } = await sql<{ table_name: string; missing: boolean; rewritable: boolean }>`
     select name as table_name,

@@ -2,7 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from '@jest/globals';
 import { sql } from 'kysely';
 import { startTestApp, type TestApp } from '../../testing/test-app.js';
 import { Numbers } from '../numbers/numbers.js';
-import { PrivilegeFault, appendOnlyTables, refuseRewritableLedgers } from './append-only.js';
+import { PrivilegeFault, appendOnlyTables, readOnlyTables, refuseRewritableLedgers } from './append-only.js';
 import { Transactions } from './transactions.js';
 
 describe('transactions', () => {
@@ -124,6 +124,19 @@ describe('append-only tables', () => {
     }
     const rewriting = app.database.pool.query(`update audit_entry set action = 'nothing.happened'`);
     await expect(rewriting).rejects.toMatchObject({ code: '42501' });
+  });
+
+  it('are listed as the grants have them', async () => {
+    const { rows } = await app.database.pool.query<{ name: string; added_to: boolean }>(
+      `select relname as name, has_table_privilege(oid, 'insert') as added_to
+       from pg_class
+       where relnamespace = 'public'::regnamespace and relkind = 'r' and relname <> 'schema_migration'
+         and not has_any_column_privilege(oid, 'update') and not has_table_privilege(oid, 'delete')
+       order by 1`,
+    );
+    const named = (addedTo: boolean) => rows.filter((row) => row.added_to === addedTo).map((row) => row.name);
+    expect(named(true)).toEqual(appendOnlyTables);
+    expect(named(false)).toEqual(readOnlyTables);
   });
 
   it('keep the server from starting when they are not there or can be rewritten', async () => {

@@ -20,6 +20,8 @@ declare module 'http' {
 
 declare module 'express-session' {
   interface SessionData {
+    /** Who it belongs to, kept by passport. */
+    passport?: { user?: number };
     /** When this session began, in milliseconds; it ends a fixed time later whatever is done in it. */
     createdAt?: number;
     /** When it was last used, to the minute. */
