@@ -33,6 +33,19 @@ async function describeServer() {
   return createDocument(AppModule);
 }
 
+/** The compiler tells the members of a union in an order that depends on what it met before; here they have one. */
+function withSortedChoices(value) {
+  if (Array.isArray(value)) return value.map(withSortedChoices);
+  if (typeof value !== 'object' || value === null) return value;
+  const entries = Object.entries(value).map(([key, item]) => [
+    key,
+    key === 'enum' && Array.isArray(item)
+      ? [...item].sort((one, other) => String(one).localeCompare(String(other)))
+      : withSortedChoices(item),
+  ]);
+  return Object.fromEntries(entries);
+}
+
 /** @returns {Promise<string>} the types as they are committed */
 async function typesOf(document) {
   const require = createRequire(join(root, 'client/package.json'));
@@ -43,7 +56,7 @@ async function typesOf(document) {
   return format(header + text, { ...(await resolveConfig(output)), parser: 'typescript' });
 }
 
-const document = await describeServer();
+const document = withSortedChoices(await describeServer());
 if (process.argv.includes('--print')) {
   console.log(JSON.stringify(document, null, 2));
 } else {

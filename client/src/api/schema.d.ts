@@ -1216,7 +1216,7 @@ export interface components {
       /** @description What happened, for whoever reads it later. */
       note: string;
       /** @enum {string} */
-      reason: 'found' | 'lost' | 'damaged' | 'counted';
+      reason: 'counted' | 'damaged' | 'found' | 'lost';
     };
     AdjustmentLineDto: {
       bin: string;
@@ -1250,7 +1250,7 @@ export interface components {
       /** @description The name at that time; null for what the product did by itself. */
       actorName: string | null;
       /** @enum {string|null} */
-      actorRole: 'owner' | 'assembler' | 'accountant' | 'customer' | null;
+      actorRole: 'accountant' | 'assembler' | 'customer' | 'owner' | null;
       after: {
         [key: string]: unknown;
       } | null;
@@ -1473,7 +1473,7 @@ export interface components {
       before: components['schemas']['CharacteristicDto'] | null;
       fields: string[];
       /** @enum {string} */
-      kind: 'added' | 'removed' | 'changed';
+      kind: 'added' | 'changed' | 'removed';
     };
     CharacteristicDto: {
       caution: string | null;
@@ -1590,7 +1590,7 @@ export interface components {
        * @description Where the cost comes from: the average of what lies on the shelf, the last that came in, its own bill, or nowhere.
        * @enum {string}
        */
-      basis: 'unknown' | 'average' | 'last' | 'bill';
+      basis: 'average' | 'bill' | 'last' | 'unknown';
       part: components['schemas']['BillPartDto'];
       position: number;
       /** @description Of the component, for one made, with its allowance for scrap; in its stock unit. */
@@ -1721,7 +1721,7 @@ export interface components {
       /** @description For a draft: what stands against releasing it, a sentence each. */
       against: string[];
       /** @enum {string} */
-      kind: 'draft_waiting' | 'component_retired' | 'cannot_build';
+      kind: 'cannot_build' | 'component_retired' | 'draft_waiting';
       number: number;
       part: components['schemas']['BillPartDto'];
       /** @description Codes of the parts it is about: retired or missing ones. */
@@ -1747,24 +1747,24 @@ export interface components {
      * @enum {string}
      */
     ErrorCode:
-      | 'invalid_input'
-      | 'not_signed_in'
-      | 'wrong_credentials'
-      | 'stale_form'
-      | 'not_allowed'
-      | 'not_found'
-      | 'changed_meanwhile'
-      | 'wrong_state'
       | 'already_exists'
-      | 'not_enough_stock'
-      | 'link_expired'
-      | 'too_large'
-      | 'unsupported_media'
-      | 'rule_broken'
+      | 'changed_meanwhile'
+      | 'invalid_input'
       | 'key_reused'
+      | 'link_expired'
+      | 'not_allowed'
+      | 'not_enough_stock'
+      | 'not_found'
+      | 'not_signed_in'
+      | 'rule_broken'
+      | 'service_unavailable'
+      | 'stale_form'
+      | 'too_large'
       | 'too_many_tries'
       | 'unexpected'
-      | 'service_unavailable';
+      | 'unsupported_media'
+      | 'wrong_credentials'
+      | 'wrong_state';
     FieldFaultDto: {
       code: string;
       detail: string;
@@ -1798,7 +1798,7 @@ export interface components {
       additions: number;
       columns: components['schemas']['FileColumnDto'][];
       /** @enum {string|null} */
-      decimalSign: 'point' | 'comma' | null;
+      decimalSign: 'comma' | 'point' | null;
       /** @description All of them are counted; the first thousand are listed. */
       faultCount: number;
       faults: components['schemas']['RowFaultDto'][];
@@ -1849,7 +1849,7 @@ export interface components {
       email: string;
       name: string;
       /** @enum {string} */
-      role: 'owner' | 'assembler' | 'accountant';
+      role: 'accountant' | 'assembler' | 'owner';
     };
     KitListDto: {
       items: components['schemas']['KitListItemDto'][];
@@ -1878,7 +1878,7 @@ export interface components {
       /** @description Which fields differ. */
       fields: string[];
       /** @enum {string} */
-      kind: 'added' | 'removed' | 'changed';
+      kind: 'added' | 'changed' | 'removed';
     };
     LinkDto: {
       token: string;
@@ -1918,7 +1918,7 @@ export interface components {
       quantity: string;
       receivedOn: string | null;
       /** @enum {string} */
-      status: 'held' | 'released' | 'rejected';
+      status: 'held' | 'rejected' | 'released';
       statusChanges: components['schemas']['LotStatusChangeDto'][];
       supplier: string | null;
       supplierLot: string | null;
@@ -1939,7 +1939,7 @@ export interface components {
       quantity: string;
       receivedOn: string | null;
       /** @enum {string} */
-      status: 'held' | 'released' | 'rejected';
+      status: 'held' | 'rejected' | 'released';
       supplier: string | null;
       supplierLot: string | null;
     };
@@ -1964,7 +1964,7 @@ export interface components {
       /** @description Why, for whoever asks later. */
       reason: string;
       /** @enum {string} */
-      status: 'held' | 'released' | 'rejected';
+      status: 'held' | 'rejected' | 'released';
       version: number;
     };
     MadeOnTheWayDto: {
@@ -1972,7 +1972,7 @@ export interface components {
       quantity: string;
     };
     /** @enum {string} */
-    MailState: 'waiting' | 'sent' | 'given_up' | 'uncertain';
+    MailState: 'given_up' | 'sent' | 'uncertain' | 'waiting';
     MissingPartDto: {
       claimed: string;
       /** @description How much of it is missing. */
@@ -2051,7 +2051,7 @@ export interface components {
       /** @enum {string} */
       chemistry: 'lithium_ion' | 'lithium_metal';
       /** @enum {string} */
-      kind: 'cell' | 'battery';
+      kind: 'battery' | 'cell';
       /**
        * Format: decimal
        * @example 12.5
@@ -2080,7 +2080,7 @@ export interface components {
        * @description The stock unit; it stays once something has moved.
        * @enum {string}
        */
-      measure: 'piece' | 'set' | 'pair' | 'm' | 'mm' | 'kg' | 'g' | 'l' | 'ml';
+      measure: 'g' | 'kg' | 'l' | 'm' | 'ml' | 'mm' | 'pair' | 'piece' | 'set';
       /** @description Whether measure and the way it is followed stay as they are, because something has moved. */
       moved: boolean;
       name: string;
@@ -2117,7 +2117,7 @@ export interface components {
        * @description The stock unit; it stays once something has moved.
        * @enum {string}
        */
-      measure: 'piece' | 'set' | 'pair' | 'm' | 'mm' | 'kg' | 'g' | 'l' | 'ml';
+      measure: 'g' | 'kg' | 'l' | 'm' | 'ml' | 'mm' | 'pair' | 'piece' | 'set';
       name: string;
       originCountryCode?: string | null;
       parameters: components['schemas']['PartParameterDto'][];
@@ -2151,7 +2151,7 @@ export interface components {
        * @description The stock unit; it stays once something has moved.
        * @enum {string}
        */
-      measure: 'piece' | 'set' | 'pair' | 'm' | 'mm' | 'kg' | 'g' | 'l' | 'ml';
+      measure: 'g' | 'kg' | 'l' | 'm' | 'ml' | 'mm' | 'pair' | 'piece' | 'set';
       name: string;
       originCountryCode?: string | null;
       parameters: components['schemas']['PartParameterDto'][];
@@ -2259,7 +2259,7 @@ export interface components {
       version: number;
     };
     /** @enum {string} */
-    Role: 'owner' | 'assembler' | 'accountant' | 'customer';
+    Role: 'accountant' | 'assembler' | 'customer' | 'owner';
     RowFaultDto: {
       column: string | null;
       /** @description In the file; the header is line 1. */
@@ -2408,7 +2408,7 @@ export interface components {
     };
     StaffEditDto: {
       /** @enum {string} */
-      role?: 'owner' | 'assembler' | 'accountant';
+      role?: 'accountant' | 'assembler' | 'owner';
       /**
        * @description Whether they may sign in.
        * @enum {string}
@@ -2429,13 +2429,13 @@ export interface components {
       total: number;
     };
     /** @enum {string} */
-    StaffRole: 'owner' | 'assembler' | 'accountant';
+    StaffRole: 'accountant' | 'assembler' | 'owner';
     StepChangeDto: {
       after: components['schemas']['BuildStepDto'] | null;
       before: components['schemas']['BuildStepDto'] | null;
       fields: string[];
       /** @enum {string} */
-      kind: 'added' | 'removed' | 'changed';
+      kind: 'added' | 'changed' | 'removed';
     };
     StockDocumentDto: {
       number: string;
@@ -2576,7 +2576,7 @@ export interface components {
       top: boolean;
     };
     /** @enum {string} */
-    UserStatus: 'invited' | 'unconfirmed' | 'active' | 'disabled';
+    UserStatus: 'active' | 'disabled' | 'invited' | 'unconfirmed';
     VatExceptionDto: {
       countryCode: string;
       /** @description The beginning of the postcodes it holds for. */
@@ -2645,7 +2645,7 @@ export interface operations {
         /** @description The start of an action's name: `user` finds all that was done to people's accounts. */
         action?: string;
         actorId?: number;
-        actorRole?: 'owner' | 'assembler' | 'accountant' | 'customer';
+        actorRole?: 'accountant' | 'assembler' | 'customer' | 'owner';
         /** @description First day, in the shop's zone. */
         from?: string;
         page?: number;
@@ -3766,7 +3766,7 @@ export interface operations {
       content: {
         'multipart/form-data': {
           /** @enum {string} */
-          decimalSign?: 'point' | 'comma';
+          decimalSign?: 'comma' | 'point';
           /** Format: binary */
           file: string;
           mapping?: string;
@@ -3806,7 +3806,7 @@ export interface operations {
       content: {
         'multipart/form-data': {
           /** @enum {string} */
-          decimalSign?: 'point' | 'comma';
+          decimalSign?: 'comma' | 'point';
           /** Format: binary */
           file: string;
           mapping?: string;
@@ -4072,7 +4072,7 @@ export interface operations {
         q?: string;
         /** @description A column to sort by; a hyphen in front turns the order round. */
         sort?: string;
-        status?: 'held' | 'released' | 'rejected';
+        status?: 'held' | 'rejected' | 'released';
         /** @description A supplier's code. */
         supplier?: string;
         /** @description Also the ones of which nothing is left. */
@@ -4176,7 +4176,7 @@ export interface operations {
         q?: string;
         /** @description A column to sort by; a hyphen in front turns the order round. */
         sort?: string;
-        state?: 'waiting' | 'sent' | 'given_up' | 'uncertain';
+        state?: 'given_up' | 'sent' | 'uncertain' | 'waiting';
       };
       header?: never;
       path?: never;
