@@ -9,6 +9,7 @@ import { remark } from './progress.mjs';
 import { root } from './root.mjs';
 
 const demoLoader = join(root, 'server/dist/demo/load.js');
+const demoPeople = join(root, 'server/dist/demo/sign-ins.js');
 
 export const logFile = (name) => join(root, '.local/log', `${name}.log`);
 
@@ -66,11 +67,21 @@ export async function loadDemo(serverUrl, { env, guard }) {
   await runNode([demoLoader], { guard, env: { ...env, DATABASE_URL: serverUrl } });
 }
 
-/** One line a person of the demo. */
-export async function demoSignIns() {
-  if (!existsSync(demoLoader)) return [];
-  const { demoSignIns: list } = await import(pathToFileURL(join(root, 'server/dist/demo/sign-ins.js')).href);
-  return list.map(({ role, email, password }) => `    ${role.padEnd(11)} ${email.padEnd(36)} ${password}`);
+/**
+ * How to get in: the code for the first owner of an empty shop, or the demo's people if this is the demo's shop.
+ * @returns {Promise<string[]>} lines to show
+ */
+export async function waysIn({ database, baseUrl, setUpCode }) {
+  if (await database.isEmpty()) {
+    return [`  An empty shop. Its owner signs up at ${baseUrl}/first-owner with the code ${setUpCode}`];
+  }
+  if (!existsSync(demoPeople)) return [];
+  const { demoSignIns } = await import(pathToFileURL(demoPeople).href);
+  if (!(await database.hasPerson(demoSignIns[0].email))) return [];
+  const lines = demoSignIns.map(
+    ({ role, email, password }) => `    ${role.padEnd(11)} ${email.padEnd(36)} ${password}`,
+  );
+  return ['  Sign in as', ...lines];
 }
 
 /** Resolves when the person at the terminal, or whoever runs this, asks for the end. */

@@ -5,7 +5,7 @@ import { join } from 'node:path';
 import { freePort } from '../../db/scripts/cluster.mjs';
 import { startGuard } from '../../db/scripts/guard.mjs';
 import { tryLock } from '../../db/scripts/lock.mjs';
-import { demoSignIns, loadDemo, logFile, runNode, startFakes, startServer, untilStopped } from './bring-up.mjs';
+import { loadDemo, logFile, runNode, startFakes, startServer, untilStopped, waysIn } from './bring-up.mjs';
 import { ensureDependencies } from './dependencies.mjs';
 import { openDatabase } from './local-database.mjs';
 import { choosePorts, localSecrets, serverEnvironment } from './local-settings.mjs';
@@ -59,8 +59,7 @@ async function bringUp(guard) {
     `  Server          http://127.0.0.1:${ports.server}`,
     `  Caught mail     http://127.0.0.1:${ports.mailPage}`,
     `  Payments (test) http://127.0.0.1:${ports.payments}`,
-    '  Sign in as',
-    ...(await demoSignIns()),
+    ...(await waysIn({ database, baseUrl, setUpCode: secrets.setUp })),
     `  Logs: ${['compiler', 'server', 'vite', 'fakes'].map(logFile).join(' ')}`,
     '',
   ];

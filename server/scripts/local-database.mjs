@@ -9,7 +9,11 @@ const name = 'emberlot';
 /** Filled under this name and renamed when whole, so that an interrupted first start begins anew. */
 const draftName = 'emberlot_draft';
 
-const emptyQuestion = 'select not exists (select from app_user) as empty';
+const isEmptyQuestion = "select case when exists (select from app_user) then 'no' else 'yes' end as answer";
+
+/** @param {string} email of somebody the demo brings */
+const hasPersonQuestion = (email) =>
+  `select case when exists (select from app_user where email = '${email.replaceAll("'", "''")}') then 'yes' else 'no' end as answer`;
 
 async function migrate(ownerUrl) {
   const runner = await import(pathToFileURL(join(root, 'db/dist/migrate.js')).href);
@@ -35,18 +39,20 @@ function givenDatabase(serverUrl) {
     },
     async prepare(fill) {
       const applied = await migrate(ownerUrl);
-      if (fill && (await isEmptyAt(ownerUrl))) await fill(serverUrl);
+      if (fill && (await askAt(ownerUrl, isEmptyQuestion))) await fill(serverUrl);
       return applied.length;
     },
+    isEmpty: () => askAt(ownerUrl, isEmptyQuestion),
+    hasPerson: (email) => askAt(ownerUrl, hasPersonQuestion(email)),
   };
 }
 
-async function isEmptyAt(ownerUrl) {
+async function askAt(ownerUrl, question) {
   const pg = createRequire(join(root, 'db/package.json'))('pg');
   const client = new pg.Client({ connectionString: ownerUrl });
   await client.connect();
   try {
-    return (await client.query(emptyQuestion)).rows[0].empty;
+    return (await client.query(question)).rows[0].answer === 'yes';
   } finally {
     await client.end();
   }
@@ -59,6 +65,7 @@ async function ownDatabase({ report, guard }) {
   const drop = (database) => cluster.sql(`drop database if exists ${database} with (force)`);
   const create = (database) =>
     cluster.sql(`create database ${database} owner emberlot_owner template template0 encoding 'UTF8'`);
+  const ask = async (question) => cluster.sql(question, name) === 'yes';
   const fillAnew = async (fill) => {
     drop(draftName);
     create(draftName);
@@ -76,7 +83,9 @@ async function ownDatabase({ report, guard }) {
       if (fill && !exists()) return fillAnew(fill);
       if (!exists()) create(name);
       const applied = await migrate(cluster.ownerUrl(name));
-      return fill && cluster.sql(emptyQuestion, name) === 't' ? fillAnew(fill) : applied.length;
+      return fill && (await ask(isEmptyQuestion)) ? fillAnew(fill) : applied.length;
     },
+    isEmpty: () => ask(isEmptyQuestion),
+    hasPerson: (email) => ask(hasPersonQuestion(email)),
   };
 }

@@ -7,7 +7,7 @@ import { createInterface } from 'node:readline/promises';
 import { parseArgs } from 'node:util';
 import { startGuard } from '../../db/scripts/guard.mjs';
 import { tryLock } from '../../db/scripts/lock.mjs';
-import { demoSignIns, loadDemo, runNode, startFakes, startServer, untilStopped } from './bring-up.mjs';
+import { loadDemo, runNode, startFakes, startServer, untilStopped, waysIn } from './bring-up.mjs';
 import { ensureDependencies } from './dependencies.mjs';
 import { openDatabase } from './local-database.mjs';
 import { choosePorts, localSecrets, serverEnvironment } from './local-settings.mjs';
@@ -52,17 +52,14 @@ function deleteData(database) {
   rmSync(join(root, '.local/fakes'), { recursive: true, force: true });
 }
 
-async function showAddresses({ env, ports, secrets, empty }) {
-  const signIns = empty ? [] : await demoSignIns();
+async function showAddresses({ env, ports, secrets, database }) {
   const lines = [
     '',
     `  Emberlot        ${env.BASE_URL}`,
     `  Caught mail     http://127.0.0.1:${ports.mailPage}`,
     `  Payments (test) http://127.0.0.1:${ports.payments}`,
     '',
-    ...(signIns.length === 0
-      ? [`  An empty shop. Its owner signs up at ${env.BASE_URL}/first-owner with the code ${secrets.setUp}`]
-      : ['  Sign in as', ...signIns]),
+    ...(await waysIn({ database, baseUrl: env.BASE_URL, setUpCode: secrets.setUp })),
     '',
     `  Logs are in ${join(root, '.local/log')}. Ctrl-C stops everything.`,
     '',
@@ -85,7 +82,7 @@ async function bringUp(options, guard) {
     return applied === 0 ? 'up to date' : `${applied} migrations applied`;
   });
   const server = await step('Server', () => startServer({ env, guard }));
-  await showAddresses({ env, ports, secrets, empty: options.empty });
+  await showAddresses({ env, ports, secrets, database });
   return [fakes, server];
 }
 
