@@ -1,5 +1,5 @@
 import { ArithmeticError } from '../errors/arithmetic-error.js';
-import { Decimal, type DecimalInput, onCommonScale } from '../measure/decimal.js';
+import { Decimal, type DecimalInput } from '../measure/decimal.js';
 import {
   type BillLine,
   type Bills,
@@ -10,6 +10,7 @@ import {
   quantityFrom,
 } from './bill-lines.js';
 import { lowLevelCodes } from './low-level-codes.js';
+import { type Ratio, inSteps, multiply, one, ratioOf } from './ratio.js';
 
 /** What a question about building needs to know. */
 export interface BuildQuestion {
@@ -20,12 +21,6 @@ export interface BuildQuestion {
   readonly onHand: ReadonlyMap<PartKey, DecimalInput>;
   /** Decimals of each part's stock unit (0 for pieces). */
   readonly decimals: IssueDecimals;
-}
-
-/** An exact fraction; the denominator is above zero. */
-export interface Ratio {
-  readonly numerator: bigint;
-  readonly denominator: bigint;
 }
 
 /** One way to fill a line. Quantities are whole steps, a step being the last decimal of a part's stock unit. */
@@ -60,13 +55,6 @@ export interface NetworkPart {
 export interface BuildNetwork {
   readonly parts: readonly NetworkPart[];
   readonly lines: readonly NetworkLine[];
-}
-
-export const one: Ratio = { numerator: 1n, denominator: 1n };
-
-/** amount × ratio, rounded up to whole steps. */
-export function timesRoundedUp(amount: bigint, { numerator, denominator }: Ratio): bigint {
-  return (amount * numerator + denominator - 1n) / denominator;
 }
 
 /**
@@ -117,12 +105,12 @@ function networkLine(
   indexOf: ReadonlyMap<PartKey, number>,
   decimals: IssueDecimals,
 ): NetworkLine {
-  const taken = ratio(line.quantityPer, new Decimal(1).minus(line.scrapShare));
+  const taken = ratioOf(line.quantityPer, new Decimal(1).minus(line.scrapShare));
   const steps = (part: PartKey, from: PartKey, base: Ratio): Ratio => inSteps(base, decimals(part) - decimals(from));
   const own = line.part;
   const mixes = line.alternatesMix === true;
   const option = (part: PartKey, factor: Decimal): NetworkOption => {
-    const perShare = ratio(factor, new Decimal(1));
+    const perShare = ratioOf(factor, new Decimal(1));
     const base = mixes ? steps(part, own, perShare) : steps(part, parentKey, multiply(taken, perShare));
     return { part: indexOf.get(part) ?? 0, ratio: base };
   };
@@ -132,26 +120,4 @@ function networkLine(
     basis: mixes ? steps(own, parentKey, taken) : one,
     options: [option(own, new Decimal(1)), ...alternatesInOrder(line).map(({ part, factor }) => option(part, factor))],
   };
-}
-
-function ratio(dividend: Decimal, divisor: Decimal): Ratio {
-  const [numerator = 0n, denominator = 1n] = onCommonScale([dividend, divisor]).integers;
-  return reduce({ numerator, denominator });
-}
-
-function multiply(a: Ratio, b: Ratio): Ratio {
-  return reduce({ numerator: a.numerator * b.numerator, denominator: a.denominator * b.denominator });
-}
-
-function inSteps({ numerator, denominator }: Ratio, moreDecimals: number): Ratio {
-  const power = 10n ** BigInt(Math.abs(moreDecimals));
-  return moreDecimals >= 0
-    ? reduce({ numerator: numerator * power, denominator })
-    : reduce({ numerator, denominator: denominator * power });
-}
-
-function reduce({ numerator, denominator }: Ratio): Ratio {
-  let [a, b] = [numerator, denominator];
-  while (b !== 0n) [a, b] = [b, a % b];
-  return { numerator: numerator / a, denominator: denominator / a };
 }

@@ -1,11 +1,12 @@
 import { Decimal } from '../measure/decimal.js';
 import type { PartKey } from './bill-lines.js';
-import { type BuildNetwork, timesRoundedUp } from './build-network.js';
+import type { BuildNetwork } from './build-network.js';
 import { type BuildProgram, type ShortagePrice, buildProgram } from './build-program.js';
 import { type BuildRanges, buildRanges } from './build-ranges.js';
 import { type ProgramPart, independentParts } from './independent-parts.js';
 import { type EffortBudget, solveIntegerProgram } from './integer-program.js';
 import { ShareRepair, type Shares, fitsPlainNumbers } from './share-repair.js';
+import { timesRoundedUp } from './ratio.js';
 
 /** One way to build: quantities in stock units. */
 export interface BuildPlan {

@@ -1,6 +1,7 @@
-import { type BuildNetwork, type NetworkLine, type Ratio, timesRoundedUp } from './build-network.js';
+import type { BuildNetwork, NetworkLine } from './build-network.js';
 import type { BuildRanges } from './build-ranges.js';
 import type { IntegerProgram, IntegerRow, IntegerVariable } from './integer-program.js';
+import { type Ratio, timesRoundedUp } from './ratio.js';
 
 /** The choices that are still open, as a whole-number program over steps. */
 export interface BuildProgram extends IntegerProgram {

@@ -1,4 +1,5 @@
-import { type BuildNetwork, type NetworkLine, timesRoundedUp } from './build-network.js';
+import type { BuildNetwork, NetworkLine } from './build-network.js';
+import { timesRoundedUp } from './ratio.js';
 
 export interface Range {
   readonly least: bigint;

@@ -1,5 +1,6 @@
-import { type BuildNetwork, type NetworkLine, type Ratio, timesRoundedUp } from './build-network.js';
+import type { BuildNetwork, NetworkLine } from './build-network.js';
 import type { Range } from './build-ranges.js';
+import { type Ratio, timesRoundedUp } from './ratio.js';
 
 /** Shares of each line's options; a settled line has a single entry that is not zero. */
 export type Shares = readonly (readonly number[])[];
