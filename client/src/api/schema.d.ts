@@ -904,7 +904,8 @@ export interface paths {
       path?: never;
       cookie?: never;
     };
-    get: operations['Shop_read'];
+    /** Who the shop is, and where it delivers. */
+    get: operations['Storefront_front'];
     put: operations['Shop_edit'];
     post: operations['Shop_setUp'];
     delete?: never;
@@ -940,6 +941,72 @@ export interface paths {
     put?: never;
     post?: never;
     delete: operations['Shop_open'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/shop/listings': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Storefront_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/shop/listings/{slug}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Storefront_product'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/shop/orders': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Orders what is in the basket, with obligation to pay. */
+    post: operations['Checkout_order'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/shop/quotes': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Prices a basket; claims nothing. */
+    post: operations['Storefront_quote'];
+    delete?: never;
     options?: never;
     head?: never;
     patch?: never;
@@ -1267,6 +1334,15 @@ export interface components {
       items: components['schemas']['AuditEntryDto'][];
       total: number;
     };
+    BasketDto: {
+      country: string;
+      lines: components['schemas']['BasketLineDto'][];
+      postcode?: string;
+    };
+    BasketLineDto: {
+      listingId: number;
+      quantity: number;
+    };
     BillComparisonDto: {
       from: number;
       lines: components['schemas']['LineChangeDto'][];
@@ -1502,6 +1578,35 @@ export interface components {
       target?: string | null;
       unit?: string | null;
       upperLimit?: string | null;
+    };
+    CheckedOutDto: {
+      /** @description Opens the order without signing in; given out once. */
+      guestToken: string;
+      number: string;
+      /** @description Where to pay; null when the payments service did not answer. */
+      paymentPage: string | null;
+    };
+    CheckoutDto: {
+      addressLine: string;
+      addressLine2?: string;
+      city: string;
+      company?: string;
+      country: string;
+      /** Format: email */
+      email: string;
+      /**
+       * Format: date
+       * @description The day the buyer was promised.
+       * @example 2027-02-28
+       */
+      expectedDay: string;
+      /** @description The total the buyer saw, in minor units. */
+      expectedGross: number;
+      lines: components['schemas']['BasketLineDto'][];
+      postcode: string;
+      recipient: string;
+      /** @description The terms were read and accepted. */
+      termsAccepted: boolean;
     };
     ClosedDayDto: {
       /**
@@ -2235,6 +2340,31 @@ export interface components {
       name: string;
       version: number;
     };
+    QuotedLineDto: {
+      form: string;
+      listingId: number;
+      net: components['schemas']['MoneyDto'];
+      quantity: number;
+      slug: string;
+      title: string;
+      unitGross: components['schemas']['MoneyDto'];
+      unitNet: components['schemas']['MoneyDto'];
+    };
+    QuoteDto: {
+      /** @description Null when it can be ordered. */
+      ask: string | null;
+      delivery: components['schemas']['MoneyDto'] | null;
+      gross: components['schemas']['MoneyDto'] | null;
+      lines: components['schemas']['QuotedLineDto'][];
+      net: components['schemas']['MoneyDto'] | null;
+      promise: components['schemas']['ShopPromiseDto'] | null;
+      /** @description Working days on the way, as a guide. */
+      transitDays: number | null;
+      vat: components['schemas']['MoneyDto'] | null;
+      vatCountry: string | null;
+      vatNote: string | null;
+      vatRate: string | null;
+    };
     ReversalInputDto: {
       /** @description Why it was wrong. */
       reason: string;
@@ -2286,6 +2416,16 @@ export interface components {
       shop: components['schemas']['ShopDto'] | null;
       /** @description The zone of the shop's days, which is set where the server is started. */
       zone: string;
+    };
+    ShopContentDto: {
+      bag: string;
+      measure: string;
+      name: string;
+      quantity: string;
+    };
+    ShopCountryDto: {
+      code: string;
+      name: string;
     };
     ShopDto: {
       addressLine: string;
@@ -2361,6 +2501,21 @@ export interface components {
       /** @description ISO weekdays on which the shop works: Monday 1 to Sunday 7. */
       workingWeekdays: number[];
     };
+    ShopFrontDto: {
+      addressLine: string;
+      city: string;
+      /** @description Countries the shop delivers to, by name. */
+      countries: components['schemas']['ShopCountryDto'][];
+      country: string;
+      email: string;
+      legalName: string;
+      name: string;
+      phone: string | null;
+      postcode: string;
+      registrationNumber: string | null;
+      vatNumber: string | null;
+      warrantyMonths: number;
+    };
     ShopInputDto: {
       addressLine: string;
       bankName?: string | null;
@@ -2394,6 +2549,66 @@ export interface components {
       warrantyMonths: number;
       /** @description ISO weekdays on which the shop works: Monday 1 to Sunday 7. */
       workingWeekdays: number[];
+    };
+    ShopListingDto: {
+      drawing: string | null;
+      family: string;
+      /** @enum {string} */
+      form: 'kit' | 'spare' | 'tool';
+      id: number;
+      /** @description Null when its destination's VAT is a matter to ask us about. */
+      price: components['schemas']['ShopPriceDto'] | null;
+      promise: components['schemas']['ShopPromiseDto'];
+      slug: string;
+      summary: string;
+      title: string;
+    };
+    ShopListingsDto: {
+      /** @description Why there are no prices, as a sentence; null when there are. */
+      ask: string | null;
+      items: components['schemas']['ShopListingDto'][];
+    };
+    ShopPositionDto: {
+      /** @description The number in the drawing. */
+      mark: string;
+      name: string;
+    };
+    ShopPriceDto: {
+      gross: components['schemas']['MoneyDto'];
+      net: components['schemas']['MoneyDto'];
+      /** @description Name of the country whose VAT it is; null for an export. */
+      vatCountry: string | null;
+      /** @description Percent. */
+      vatRate: string;
+    };
+    ShopProductDto: {
+      ask: string | null;
+      cautions: string[];
+      /** @description What is in the kit's bags; empty for tools and spares. */
+      contents: components['schemas']['ShopContentDto'][];
+      description: string;
+      drawing: string | null;
+      family: string;
+      /** @enum {string} */
+      form: 'kit' | 'spare' | 'tool';
+      id: number;
+      /** @description Names of the numbered positions in the drawing. */
+      positions: components['schemas']['ShopPositionDto'][];
+      /** @description Null when its destination's VAT is a matter to ask us about. */
+      price: components['schemas']['ShopPriceDto'] | null;
+      promise: components['schemas']['ShopPromiseDto'];
+      /** @description The same thing in its other forms. */
+      siblings: components['schemas']['ShopListingDto'][];
+      skills: string | null;
+      slug: string;
+      summary: string;
+      title: string;
+    };
+    ShopPromiseDto: {
+      /** @description Comes out of a batch under way, not from the shelf. */
+      fromBatch: boolean;
+      /** @description `YYYY-MM-DD` */
+      leavesBy: string | null;
     };
     SignInDto: {
       /** Format: email */
@@ -4714,7 +4929,7 @@ export interface operations {
       };
     };
   };
-  Shop_read: {
+  Storefront_front: {
     parameters: {
       query?: never;
       header?: never;
@@ -4728,7 +4943,7 @@ export interface operations {
           [name: string]: unknown;
         };
         content: {
-          'application/json': components['schemas']['ShopAnswerDto'];
+          'application/json': components['schemas']['ShopFrontDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */
@@ -4882,6 +5097,139 @@ export interface operations {
           [name: string]: unknown;
         };
         content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Storefront_list: {
+    parameters: {
+      query?: {
+        /** @description Where it goes, by ISO 3166-1; the shop's own country when nothing is said. */
+        country?: string;
+        postcode?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ShopListingsDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Storefront_product: {
+    parameters: {
+      query?: {
+        /** @description Where it goes, by ISO 3166-1; the shop's own country when nothing is said. */
+        country?: string;
+        postcode?: string;
+      };
+      header?: never;
+      path: {
+        slug: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ShopProductDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Checkout_order: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['CheckoutDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['CheckedOutDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Storefront_quote: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BasketDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['QuoteDto'];
+        };
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {

@@ -3,6 +3,7 @@ import { InvoicingModule } from '../invoicing/invoicing.module.js';
 import { JournalModule } from '../journal/journal.module.js';
 import { OrdersModule } from '../orders/orders.module.js';
 import { ApplyPaymentService } from './apply-payment.service.js';
+import { CheckoutController } from './checkout.controller.js';
 import { CheckoutService } from './checkout.service.js';
 import { OpenPaymentPageService } from './open-payment-page.service.js';
 import { PaymentEventsService } from './payment-events.service.js';
@@ -16,7 +17,7 @@ import { RefundsRepository } from './refunds.repository.js';
 
 @Module({
   imports: [InvoicingModule, JournalModule, OrdersModule],
-  controllers: [PaymentsController],
+  controllers: [CheckoutController, PaymentsController],
   providers: [
     ApplyPaymentService,
     CheckoutService,

@@ -15,4 +15,10 @@ export const publicRoutes: Readonly<Record<string, string>> = {
   'POST /api/invitation-completions': 'needs the link of a mail',
   'POST /api/email-change-completions': 'needs the link of a mail',
   'POST /api/first-owner': 'needs the set-up code, and only while there is nobody yet',
+  'GET /api/shop': 'who the shop is and where it delivers',
+  'GET /api/shop/listings': 'what the shop offers',
+  'GET /api/shop/listings/:slug': 'one thing the shop offers',
+  'POST /api/shop/quotes': 'prices a basket, claims nothing',
+  'POST /api/shop/orders': 'guests order too',
+  'POST /api/payment-events': 'the payments service signs what it sends',
 };
