@@ -583,6 +583,55 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/invoices': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Invoices_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/invoices/{code}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Invoices_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/invoices/{code}/pdf': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** The paper, also for the buyer whose it is. */
+    get: operations['Invoices_pdf'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/kits': {
     parameters: {
       query?: never;
@@ -1955,6 +2004,81 @@ export interface components {
       name: string;
       /** @enum {string} */
       role: 'accountant' | 'assembler' | 'owner';
+    };
+    InvoiceChargeDto: {
+      amount: components['schemas']['MoneyDto'];
+      reason: string;
+      vatRate: string;
+    };
+    InvoiceDto: {
+      buyer: string;
+      buyerParty: components['schemas']['InvoicePartyDto'];
+      charges: components['schemas']['InvoiceChargeDto'][];
+      country: string;
+      creditedBy: string[];
+      /** @description Of a credit note: the invoice it takes back. */
+      creditsNumber: string | null;
+      gross: components['schemas']['MoneyDto'];
+      issuedOn: string;
+      kind: components['schemas']['InvoiceKind'];
+      lines: components['schemas']['InvoiceLineDto'][];
+      net: components['schemas']['MoneyDto'];
+      /** @description What stands under the totals. */
+      notes: string[];
+      number: string;
+      prepaid: components['schemas']['MoneyDto'];
+      reason: string | null;
+      /** @description The order's number. */
+      reference: string;
+      seller: components['schemas']['InvoicePartyDto'];
+      taxPoint: string;
+      vat: components['schemas']['MoneyDto'];
+      vatGroups: components['schemas']['InvoiceVatDto'][];
+    };
+    /** @enum {string} */
+    InvoiceKind: 'credit_note' | 'invoice';
+    InvoiceLineDto: {
+      code: string;
+      description: string;
+      measure: string;
+      net: components['schemas']['MoneyDto'];
+      quantity: string;
+      /** @description Major units, decimal text. */
+      unitNet: string;
+      vatRate: string;
+    };
+    InvoicePageDto: {
+      items: components['schemas']['InvoiceRowDto'][];
+      total: number;
+    };
+    InvoicePartyDto: {
+      addressLine: string;
+      addressLine2: string | null;
+      city: string;
+      countryCode: string;
+      name: string;
+      postcode: string;
+      vatNumber: string | null;
+    };
+    InvoiceRowDto: {
+      buyer: string;
+      country: string;
+      /** @description Of a credit note: the invoice it takes back. */
+      creditsNumber: string | null;
+      gross: components['schemas']['MoneyDto'];
+      issuedOn: string;
+      kind: components['schemas']['InvoiceKind'];
+      net: components['schemas']['MoneyDto'];
+      number: string;
+      /** @description The order's number. */
+      reference: string;
+      vat: components['schemas']['MoneyDto'];
+    };
+    InvoiceVatDto: {
+      amount: components['schemas']['MoneyDto'];
+      category: string;
+      rate: string;
+      taxable: components['schemas']['MoneyDto'];
     };
     KitListDto: {
       items: components['schemas']['KitListItemDto'][];
@@ -4161,6 +4285,104 @@ export interface operations {
         content: {
           'application/json': components['schemas']['StaffMemberDto'];
         };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Invoices_list: {
+    parameters: {
+      query?: {
+        /** @description First day of issue. */
+        from?: string;
+        kind?: 'credit_note' | 'invoice';
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+        /** @description Last day of issue. */
+        to?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['InvoicePageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Invoices_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['InvoiceDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Invoices_pdf: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {
