@@ -465,6 +465,7 @@ CREATE TABLE public.batch (
     status text DEFAULT 'planned'::text NOT NULL,
     start_on date,
     due_on date NOT NULL,
+    made_quantity integer DEFAULT 0 NOT NULL,
     note text,
     created_at timestamp with time zone NOT NULL,
     created_by bigint,
@@ -472,11 +473,14 @@ CREATE TABLE public.batch (
     finished_at timestamp with time zone,
     version integer DEFAULT 1 NOT NULL,
     CONSTRAINT batch_days_in_order CHECK ((start_on <= due_on)),
+    CONSTRAINT batch_made_within CHECK (((made_quantity >= 0) AND (made_quantity <= quantity))),
     CONSTRAINT batch_quantity_check CHECK (((quantity >= 1) AND (quantity <= 1000))),
     CONSTRAINT batch_status_check CHECK ((status = ANY (ARRAY['planned'::text, 'picking'::text, 'in_build'::text, 'done'::text, 'withdrawn'::text])))
 );
 
 COMMENT ON TABLE public.batch IS 'A number of pieces of one made part, built together to one bill revision.';
+
+COMMENT ON COLUMN public.batch.made_quantity IS 'Of a part that is not followed one by one: pieces that came onto the shelf so far. Units say it themselves.';
 
 CREATE TABLE public.batch_cost (
     id bigint NOT NULL,
@@ -566,10 +570,17 @@ CREATE TABLE public.batch_step (
     batch_id bigint NOT NULL,
     "position" integer NOT NULL,
     build_step_id bigint NOT NULL,
+    path text DEFAULT ''::text NOT NULL,
+    per_unit numeric(18,6) DEFAULT 1 NOT NULL,
+    CONSTRAINT batch_step_per_unit_check CHECK ((per_unit > (0)::numeric)),
     CONSTRAINT batch_step_position_check CHECK (("position" > 0))
 );
 
 COMMENT ON TABLE public.batch_step IS 'The steps of a batch in order: those of sub-assemblies built within it first, then its own.';
+
+COMMENT ON COLUMN public.batch_step.path IS 'Of which sub-assembly built within the batch; empty for the steps of the batch''s own revision.';
+
+COMMENT ON COLUMN public.batch_step.per_unit IS 'How many of the sub-assembly one unit holds: the minutes of the step count that often.';
 
 ALTER TABLE public.batch_step ALTER COLUMN id ADD GENERATED ALWAYS AS IDENTITY (
     SEQUENCE NAME public.batch_step_id_seq
@@ -579,6 +590,18 @@ ALTER TABLE public.batch_step ALTER COLUMN id ADD GENERATED ALWAYS AS IDENTITY (
     NO MAXVALUE
     CACHE 1
 );
+
+CREATE TABLE public.batch_sub_assembly (
+    batch_id bigint NOT NULL,
+    path text NOT NULL,
+    part_id bigint NOT NULL,
+    revision_id bigint NOT NULL,
+    required numeric(18,6) NOT NULL,
+    from_shelf boolean NOT NULL,
+    CONSTRAINT batch_sub_assembly_required_check CHECK ((required > (0)::numeric))
+);
+
+COMMENT ON TABLE public.batch_sub_assembly IS 'A made component of a batch, and whether it is taken from the shelf or built within the batch.';
 
 CREATE TABLE public.bill_line (
     id bigint NOT NULL,
@@ -2111,6 +2134,9 @@ ALTER TABLE ONLY public.batch_step
 ALTER TABLE ONLY public.batch_step
     ADD CONSTRAINT batch_step_position_unique UNIQUE (batch_id, "position");
 
+ALTER TABLE ONLY public.batch_sub_assembly
+    ADD CONSTRAINT batch_sub_assembly_pkey PRIMARY KEY (batch_id, path);
+
 ALTER TABLE ONLY public.bill_line_alternate
     ADD CONSTRAINT bill_line_alternate_pkey PRIMARY KEY (id);
 
@@ -2746,6 +2772,15 @@ ALTER TABLE ONLY public.batch_step
 ALTER TABLE ONLY public.batch_step
     ADD CONSTRAINT batch_step_build_step_id_fkey FOREIGN KEY (build_step_id) REFERENCES public.build_step(id);
 
+ALTER TABLE ONLY public.batch_sub_assembly
+    ADD CONSTRAINT batch_sub_assembly_batch_id_fkey FOREIGN KEY (batch_id) REFERENCES public.batch(id);
+
+ALTER TABLE ONLY public.batch_sub_assembly
+    ADD CONSTRAINT batch_sub_assembly_part_id_fkey FOREIGN KEY (part_id) REFERENCES public.part(id);
+
+ALTER TABLE ONLY public.batch_sub_assembly
+    ADD CONSTRAINT batch_sub_assembly_revision_id_fkey FOREIGN KEY (revision_id) REFERENCES public.bill_revision(id);
+
 ALTER TABLE ONLY public.bill_line_alternate
     ADD CONSTRAINT bill_line_alternate_line_id_fkey FOREIGN KEY (line_id) REFERENCES public.bill_line(id) ON DELETE CASCADE;
 
@@ -3158,6 +3193,8 @@ GRANT SELECT,USAGE ON SEQUENCE public.batch_line_id_seq TO emberlot_server;
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.batch_step TO emberlot_server;
 
 GRANT SELECT,USAGE ON SEQUENCE public.batch_step_id_seq TO emberlot_server;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.batch_sub_assembly TO emberlot_server;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.bill_line TO emberlot_server;
 

@@ -9,6 +9,7 @@ create table batch (
   status text not null default 'planned' check (status in ('planned', 'picking', 'in_build', 'done', 'withdrawn')),
   start_on date,
   due_on date not null,
+  made_quantity integer not null default 0,
   note text,
   created_at timestamptz not null,
   created_by bigint references app_user (id),
@@ -17,11 +18,13 @@ create table batch (
   version integer not null default 1,
   constraint batch_number_unique unique (number),
   constraint batch_revision_of_part foreign key (revision_id, part_id) references bill_revision (id, part_id),
-  constraint batch_days_in_order check (start_on <= due_on)
+  constraint batch_days_in_order check (start_on <= due_on),
+  constraint batch_made_within check (made_quantity between 0 and quantity)
 );
 create index batch_open on batch (due_on) where status in ('planned', 'picking', 'in_build');
 create index batch_by_part on batch (part_id, created_at desc);
 comment on table batch is 'A number of pieces of one made part, built together to one bill revision.';
+comment on column batch.made_quantity is 'Of a part that is not followed one by one: pieces that came onto the shelf so far. Units say it themselves.';
 
 alter table reservation add constraint reservation_of_batch foreign key (batch_id) references batch (id);
 
@@ -41,14 +44,29 @@ create index batch_line_by_part on batch_line (part_id);
 comment on table batch_line is 'One part a batch needs. Sub-assemblies that are not taken from the shelf are built within the batch; the path then names the bill lines down to this one.';
 comment on column batch_line.quantity_per is 'Quantity that stays in one unit; required adds the normal scrap for the whole batch.';
 
+create table batch_sub_assembly (
+  batch_id bigint not null references batch (id),
+  path text not null,
+  part_id bigint not null references part (id),
+  revision_id bigint not null references bill_revision (id),
+  required numeric(18, 6) not null check (required > 0),
+  from_shelf boolean not null,
+  primary key (batch_id, path)
+);
+comment on table batch_sub_assembly is 'A made component of a batch, and whether it is taken from the shelf or built within the batch.';
+
 create table batch_step (
   id bigint generated always as identity primary key,
   batch_id bigint not null references batch (id),
   position integer not null check (position > 0),
   build_step_id bigint not null references build_step (id),
+  path text not null default '',
+  per_unit numeric(18, 6) not null default 1 check (per_unit > 0),
   constraint batch_step_position_unique unique (batch_id, position)
 );
 comment on table batch_step is 'The steps of a batch in order: those of sub-assemblies built within it first, then its own.';
+comment on column batch_step.path is 'Of which sub-assembly built within the batch; empty for the steps of the batch''s own revision.';
+comment on column batch_step.per_unit is 'How many of the sub-assembly one unit holds: the minutes of the step count that often.';
 
 create table batch_issue (
   id bigint generated always as identity primary key,

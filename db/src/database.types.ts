@@ -97,6 +97,10 @@ export interface Batch {
   due_on: string;
   finished_at: Timestamp | null;
   id: Generated<number>;
+  /**
+   * Of a part that is not followed one by one: pieces that came onto the shelf so far. Units say it themselves.
+   */
+  made_quantity: Generated<number>;
   note: string | null;
   number: string;
   part_id: number;
@@ -148,7 +152,24 @@ export interface BatchStep {
   batch_id: number;
   build_step_id: number;
   id: Generated<number>;
+  /**
+   * Of which sub-assembly built within the batch; empty for the steps of the batch's own revision.
+   */
+  path: Generated<string>;
+  /**
+   * How many of the sub-assembly one unit holds: the minutes of the step count that often.
+   */
+  per_unit: Generated<string>;
   position: number;
+}
+
+export interface BatchSubAssembly {
+  batch_id: number;
+  from_shelf: boolean;
+  part_id: number;
+  path: string;
+  required: string;
+  revision_id: number;
 }
 
 export interface BillLine {
@@ -967,6 +988,7 @@ export interface DB {
   batch_issue: BatchIssue;
   batch_line: BatchLine;
   batch_step: BatchStep;
+  batch_sub_assembly: BatchSubAssembly;
   bill_line: BillLine;
   bill_line_alternate: BillLineAlternate;
   bill_revision: BillRevision;

@@ -14,6 +14,7 @@ import { PlatformModule } from './platform/platform.module.js';
 import { SettingsModule } from './settings/settings.module.js';
 import { StockModule } from './stock/stock.module.js';
 import { SuppliersModule } from './suppliers/suppliers.module.js';
+import { UnitsModule } from './units/units.module.js';
 
 /** Everything the server is made of; a new module is added to its row. */
 @Module({
@@ -30,6 +31,7 @@ import { SuppliersModule } from './suppliers/suppliers.module.js';
     JournalModule,
     InvoicingModule,
     // Making
+    UnitsModule,
     BuildsModule,
     PlanningModule,
     ImportsModule,

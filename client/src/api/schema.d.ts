@@ -18,6 +18,170 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/batches': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Batches_list'];
+    put?: never;
+    /** Plans a batch and claims for it what is free on the shelf. */
+    post: operations['Batches_plan'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/batches/{number}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Batches_open'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/batches/{number}/building': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Begins building: the units get their serial numbers. */
+    post: operations['Batches_start'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/batches/{number}/claims': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Claims what is missing, as far as it has come onto the shelf. */
+    post: operations['Batches_claim'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/batches/{number}/issues': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Batches_issue'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/batches/{number}/pick-list': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Batches_pickList'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/batches/{number}/returns': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Batches_giveBack'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/batches/{number}/steps/{position}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put: operations['Batches_tick'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/batches/{number}/sub-assemblies': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    /** While it is only planned: from the shelf, or built within the batch. */
+    put: operations['Batches_choose'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/batches/{number}/withdrawal': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Batches_withdraw'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/bill-components': {
     parameters: {
       query?: never;
@@ -1259,6 +1423,23 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/units/{serial}/fitted-lots': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** A lot scanned to a unit: the record then says exactly that it is in it. */
+    post: operations['Batches_fitLot'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/vat-exceptions': {
     parameters: {
       query?: never;
@@ -1391,6 +1572,137 @@ export interface components {
     BasketLineDto: {
       listingId: number;
       quantity: number;
+    };
+    BatchCharacteristicDto: {
+      caution: string | null;
+      condition: string | null;
+      digits: number | null;
+      /** @enum {string} */
+      kind: 'numeric' | 'yes_no';
+      lowerLimit: string | null;
+      name: string;
+      position: number;
+      target: string | null;
+      unit: string | null;
+      upperLimit: string | null;
+    };
+    BatchCostDto: {
+      /** @description What the batch still holds of work in progress. */
+      held: components['schemas']['MoneyDto'];
+      labour: components['schemas']['MoneyDto'];
+      loss: components['schemas']['MoneyDto'];
+      materialsIn: components['schemas']['MoneyDto'];
+      materialsOut: components['schemas']['MoneyDto'];
+    };
+    BatchDocumentDto: {
+      document: string;
+    };
+    BatchDto: {
+      buildStartedAt: string | null;
+      /** @description Not shown to assemblers. */
+      cost?: components['schemas']['BatchCostDto'];
+      createdAt: string;
+      dueOn: string;
+      /** @description Pieces that came onto the shelf. */
+      finished: number;
+      finishedAt: string | null;
+      id: number;
+      late: boolean;
+      lines: components['schemas']['BatchLineDto'][];
+      /** @description Lines of which the shelf does not hold enough. */
+      linesShort: number;
+      next: components['schemas']['NextActDto'];
+      note: string | null;
+      number: string;
+      part: components['schemas']['BatchPartDto'];
+      quantity: number;
+      revision: number;
+      scrapped: number;
+      startOn: string | null;
+      /** @enum {string} */
+      status: 'done' | 'in_build' | 'picking' | 'planned' | 'withdrawn';
+      steps: components['schemas']['BatchStepDto'][];
+      subAssemblies: components['schemas']['BatchSubAssemblyDto'][];
+      testPlan: components['schemas']['BatchCharacteristicDto'][];
+      units: components['schemas']['StripUnitDto'][];
+      version: number;
+    };
+    BatchInputDto: {
+      /**
+       * Format: date
+       * @example 2027-02-28
+       */
+      dueOn: string;
+      note?: string | null;
+      /** @description What is built: a part with a released bill. */
+      part: string;
+      quantity: number;
+      /**
+       * Format: date
+       * @example 2027-02-28
+       */
+      startOn?: string | null;
+    };
+    BatchItemDto: {
+      dueOn: string;
+      /** @description Pieces that came onto the shelf. */
+      finished: number;
+      id: number;
+      late: boolean;
+      /** @description Lines of which the shelf does not hold enough. */
+      linesShort: number;
+      next: components['schemas']['NextActDto'];
+      number: string;
+      part: components['schemas']['BatchPartDto'];
+      quantity: number;
+      revision: number;
+      scrapped: number;
+      startOn: string | null;
+      /** @enum {string} */
+      status: 'done' | 'in_build' | 'picking' | 'planned' | 'withdrawn';
+      units: components['schemas']['StripUnitDto'][];
+    };
+    BatchLineDto: {
+      /** @description Approved to stand in, the preferred one first. */
+      alternates: components['schemas']['BatchPartDto'][];
+      /** @description Claimed on the shelf for this line. */
+      claimed: string;
+      issued: string;
+      marks: string | null;
+      /** @description Needed, and neither issued nor claimed. */
+      missing: string;
+      part: components['schemas']['BatchPartDto'];
+      path: string;
+      quantityPer: string;
+      required: string;
+    };
+    BatchPageDto: {
+      items: components['schemas']['BatchItemDto'][];
+      total: number;
+    };
+    BatchPartDto: {
+      code: string;
+      measure: string;
+      name: string;
+      traced: string;
+    };
+    BatchStepDto: {
+      caution: string | null;
+      /** @description Serial numbers of the units on which it is done. */
+      doneOn: string[];
+      instruction: string;
+      /** @description Expected for one unit. */
+      minutes: string;
+      /** @description What the step makes: the batch's own part, or a sub-assembly built within it. */
+      part: string;
+      position: number;
+      title: string;
+    };
+    BatchSubAssemblyDto: {
+      fromShelf: boolean;
+      part: components['schemas']['BatchPartDto'];
+      path: string;
+      required: string;
     };
     BillComparisonDto: {
       from: number;
@@ -1944,6 +2256,17 @@ export interface components {
       /** @description Printed when the server starts, while nobody can sign in yet. */
       setupCode: string;
     };
+    FittedLotDto: {
+      /** @description A lot that was picked for this line. */
+      lot: string;
+      path: string;
+      /**
+       * Format: decimal
+       * @description In one unit; left out, all that the bill asks for.
+       * @example 12.5
+       */
+      quantity?: string | null;
+    };
     HealthDto: {
       /** @enum {string} */
       status: 'ok';
@@ -2079,6 +2402,23 @@ export interface components {
       category: string;
       rate: string;
       taxable: components['schemas']['MoneyDto'];
+    };
+    IssueInputDto: {
+      lines: components['schemas']['IssueLineDto'][];
+    };
+    IssueLineDto: {
+      bin: string;
+      /** @description Not needed for a part followed by count. */
+      lot?: string | null;
+      /** @description The line's own part, or one approved to stand in for it. */
+      part: string;
+      /** @description The place of the component in the bill: which line of the batch it is for. */
+      path: string;
+      /**
+       * Format: decimal
+       * @example 12.5
+       */
+      quantity: string;
     };
     KitListDto: {
       items: components['schemas']['KitListItemDto'][];
@@ -2246,6 +2586,11 @@ export interface components {
        * @enum {string}
        */
       from: 'nothing' | 'released';
+    };
+    NextActDto: {
+      /** @description Names the act for a program: `claim`, `pick`, `start_building`, `build`, `none`. */
+      act: string;
+      sentence: string;
     };
     OutboxMailDto: {
       attempts: number;
@@ -2433,6 +2778,36 @@ export interface components {
       id: number;
       name: string;
       role: components['schemas']['Role'];
+    };
+    PickedDto: {
+      /** @description Where it was taken from last. */
+      bin: string;
+      lot: string | null;
+      part: components['schemas']['BatchPartDto'];
+      path: string;
+      quantity: string;
+    };
+    PickListDto: {
+      number: string;
+      picked: components['schemas']['PickedDto'][];
+      rows: components['schemas']['PickRowDto'][];
+      shortages: components['schemas']['PickShortageDto'][];
+    };
+    PickRowDto: {
+      bin: string;
+      /** @description Null for a part followed by count. */
+      lot: string | null;
+      marks: string | null;
+      part: components['schemas']['BatchPartDto'];
+      path: string;
+      quantity: string;
+      /** @description The part of the bill, where this one stands in for it. */
+      standsInFor: string | null;
+    };
+    PickShortageDto: {
+      part: components['schemas']['BatchPartDto'];
+      path: string;
+      quantity: string;
     };
     ProblemDto: {
       /** @description What the client decides by. */
@@ -2776,8 +3151,28 @@ export interface components {
       /** @enum {string} */
       kind: 'added' | 'changed' | 'removed';
     };
+    StepTickDto: {
+      /** @description Done, or not done after all. */
+      done: boolean;
+      /** @description On which units. */
+      units: string[];
+    };
     StockDocumentDto: {
       number: string;
+    };
+    StripUnitDto: {
+      finished: boolean;
+      serial: string;
+      stepsDone: number;
+      stepsTotal: number;
+      /** @enum {string} */
+      verdict: 'failed' | 'open' | 'passed' | 'rework' | 'scrapped';
+    };
+    SubAssemblyInputDto: {
+      /** @description From the shelf, or built within the batch. */
+      fromShelf: boolean;
+      path: string;
+      version: number;
     };
     SuppliedPartDto: {
       code: string;
@@ -2969,6 +3364,10 @@ export interface components {
       part: components['schemas']['BillPartDto'];
       uses: components['schemas']['UseDto'][];
     };
+    WithdrawalInputDto: {
+      /** @description Why it will not be built. */
+      reason: string;
+    };
   };
   responses: never;
   parameters: never;
@@ -3010,6 +3409,377 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['AuditPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_list: {
+    parameters: {
+      query?: {
+        /** @description Neither done nor withdrawn. */
+        open?: boolean;
+        page?: number;
+        pageSize?: number;
+        part?: string;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+        status?: 'done' | 'in_build' | 'picking' | 'planned' | 'withdrawn';
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BatchPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_plan: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['BatchInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BatchDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_open: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BatchDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_start: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BatchDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_claim: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BatchDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_issue: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['IssueInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BatchDocumentDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_pickList: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PickListDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_giveBack: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['IssueInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BatchDocumentDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_tick: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+        position: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['StepTickDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BatchDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_choose: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SubAssemblyInputDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BatchDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_withdraw: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['WithdrawalInputDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BatchDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */
@@ -5923,6 +6693,38 @@ export interface operations {
         content: {
           'application/json': components['schemas']['SupplierDto'];
         };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_fitLot: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        serial: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['FittedLotDto'];
+      };
+    };
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {

@@ -25,7 +25,7 @@ export class BatchSupplyRepository {
       select coalesce(sum(r.quantity), 0) from reservation r
       where r.batch_id = batch.id and r.ended_at is null and (r.expires_at is null or r.expires_at > ${at})
     )`;
-    const free = sql<number>`floor(batch.quantity - ${settled} - ${claimed})::int8`;
+    const free = sql<number>`floor(batch.quantity - batch.made_quantity - ${settled} - ${claimed})::int8`;
     return handle
       .selectFrom('batch')
       .select([

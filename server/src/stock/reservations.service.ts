@@ -190,6 +190,18 @@ export class ReservationsService {
     }
   }
 
+  /** A batch brings nothing more: what still waits for it is a shortage of whoever claimed it. */
+  async giveUpBatch(trx: Transaction<DB>, batchId: number): Promise<void> {
+    const now = this.clock.now();
+    const live = await this.repository.liveOnBatch(trx, batchId, now);
+    await this.repository.end(
+      trx,
+      live.map(({ id }) => id),
+      'cancelled',
+      now,
+    );
+  }
+
   /** Claims on a batch that have not ended, oldest first. */
   async claimedOnBatch(handle: Kysely<DB>, batchId: number): Promise<Decimal> {
     const live = await this.repository.liveOnBatch(handle, batchId, this.clock.now());

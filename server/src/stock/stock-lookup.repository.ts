@@ -19,6 +19,7 @@ export interface StockLot {
   readonly kind: string;
   readonly status: string;
   readonly unitCost: string | null;
+  readonly expiresOn: string | null;
 }
 
 export interface StockBin {
@@ -102,6 +103,14 @@ export class StockLookupRepository {
   private lotColumns(handle: Kysely<DB>) {
     return handle
       .selectFrom('lot')
-      .select(['id', 'code', 'part_id as partId', 'kind', 'status', 'unit_cost as unitCost']);
+      .select([
+        'id',
+        'code',
+        'part_id as partId',
+        'kind',
+        'status',
+        'unit_cost as unitCost',
+        'expires_on as expiresOn',
+      ]);
   }
 }
