@@ -1507,6 +1507,7 @@ CREATE TABLE public.part_parameter (
     value_number numeric,
     value_text text,
     unit text,
+    said text GENERATED ALWAYS AS ((((name || ' '::text) || COALESCE(value_text, (trim_scale(value_number))::text)) || COALESCE(unit, ''::text))) STORED NOT NULL,
     CONSTRAINT part_parameter_name_check CHECK (((length(name) >= 1) AND (length(name) <= 60))),
     CONSTRAINT part_parameter_one_value CHECK (((value_number IS NULL) <> (value_text IS NULL)))
 );
@@ -2587,6 +2588,8 @@ CREATE INDEX packed_item_by_shipment ON public.packed_item USING btree (shipment
 CREATE UNIQUE INDEX packed_item_unit_once ON public.packed_item USING btree (unit_id) WHERE ((unit_id IS NOT NULL) AND (taken_out_at IS NULL) AND (returned_at IS NULL));
 
 CREATE INDEX part_parameter_by_name ON public.part_parameter USING btree (name, value_number);
+
+CREATE INDEX part_parameter_search ON public.part_parameter USING gin (said public.gin_trgm_ops);
 
 CREATE INDEX part_search ON public.part USING gin ((((code || ' '::text) || name)) public.gin_trgm_ops);
 

@@ -49,10 +49,14 @@ create table part_parameter (
   value_number numeric,
   value_text text,
   unit text,
+  said text not null generated always as (
+    name || ' ' || coalesce(value_text, trim_scale(value_number)::text) || coalesce(unit, '')
+  ) stored,
   constraint part_parameter_name_unique unique (part_id, name),
   constraint part_parameter_one_value check ((value_number is null) <> (value_text is null))
 );
 create index part_parameter_by_name on part_parameter (name, value_number);
+create index part_parameter_search on part_parameter using gin (said gin_trgm_ops);
 comment on table part_parameter is 'One property of a part, a number with its unit or a word.';
 
 create table part_supplier (

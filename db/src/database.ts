@@ -41,7 +41,8 @@ export function createPool(url: string, options: DatabaseOptions = {}): pg.Pool 
     query_timeout: statementMilliseconds + queryGraceMilliseconds,
     lock_timeout: options.lockMilliseconds ?? 10_000,
     idle_in_transaction_session_timeout: options.idleInTransactionMilliseconds ?? 60_000,
-    options: '-c TimeZone=UTC',
+    // Letters missed, doubled or swapped should still find a word; the usual 0.6 forgives hardly one in a short word.
+    options: '-c TimeZone=UTC -c pg_trgm.word_similarity_threshold=0.45',
     types: typeParsers,
   });
   pool.on('error', report);

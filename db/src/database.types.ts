@@ -644,6 +644,7 @@ export interface PartParameter {
   id: Generated<number>;
   name: string;
   part_id: number;
+  said: Generated<string>;
   unit: string | null;
   value_number: string | null;
   value_text: string | null;

@@ -4,6 +4,7 @@ import { OrdersModule } from './orders/orders.module.js';
 import { PaymentsModule } from './payments/payments.module.js';
 import { BuildsModule } from './builds/builds.module.js';
 import { BillsModule } from './bills/bills.module.js';
+import { FindModule } from './find/find.module.js';
 import { ImportsModule } from './imports/imports.module.js';
 import { InvoicingModule } from './invoicing/invoicing.module.js';
 import { JournalModule } from './journal/journal.module.js';
@@ -40,6 +41,7 @@ import { UnitsModule } from './units/units.module.js';
     OrdersModule,
     PaymentsModule,
     // For the accountant
+    FindModule,
   ],
 })
 export class AppModule {}

@@ -580,6 +580,23 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/find': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** Things whose code, name or serial fits; the very code first. */
+    get: operations['Find_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/first-owner': {
     parameters: {
       query?: never;
@@ -920,7 +937,7 @@ export interface paths {
       path?: never;
       cookie?: never;
     };
-    get?: never;
+    get: operations['Shelf_listParts'];
     put?: never;
     post: operations['Parts_create'];
     delete?: never;
@@ -936,7 +953,8 @@ export interface paths {
       path?: never;
       cookie?: never;
     };
-    get?: never;
+    /** One part's whole story. */
+    get: operations['Shelf_getPart'];
     put: operations['Parts_edit'];
     post?: never;
     delete?: never;
@@ -1105,6 +1123,22 @@ export interface paths {
     put?: never;
     post?: never;
     delete: operations['Sessions_end'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/shelf-queue': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Shelf_readQueue'];
+    put?: never;
+    post?: never;
+    delete?: never;
     options?: never;
     head?: never;
     patch?: never;
@@ -1385,6 +1419,22 @@ export interface paths {
     get?: never;
     put?: never;
     post: operations['StockMoves_transfer'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/stock-value': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Shelf_readValue'];
+    put?: never;
+    post?: never;
     delete?: never;
     options?: never;
     head?: never;
@@ -2231,6 +2281,15 @@ export interface components {
       | 'unsupported_media'
       | 'wrong_credentials'
       | 'wrong_state';
+    ExpiringLotDto: {
+      expired: boolean;
+      expiresOn: string;
+      lot: string;
+      measure: string;
+      name: string;
+      part: string;
+      quantity: string;
+    };
     FieldFaultDto: {
       code: string;
       detail: string;
@@ -2267,9 +2326,35 @@ export interface components {
        */
       quantity?: string | null;
     };
+    FoundDto: {
+      /** @description What stands on its tag. */
+      code: string;
+      /** @description Whether its code is the very one asked for. */
+      exact: boolean;
+      /** @enum {string} */
+      kind: 'batch' | 'bin' | 'document' | 'invoice' | 'lot' | 'order' | 'part' | 'person' | 'supplier' | 'unit';
+      /** @description One line about it. */
+      story: string;
+      /** @description Where it lives, if not at the address of its kind. */
+      to?: string;
+    };
+    FoundListDto: {
+      items: components['schemas']['FoundDto'][];
+      total: number;
+    };
     HealthDto: {
       /** @enum {string} */
       status: 'ok';
+    };
+    HeldLotDto: {
+      bins: string[];
+      lot: string;
+      measure: string;
+      name: string;
+      part: string;
+      quantity: string;
+      receivedOn: string | null;
+      supplier: string | null;
     };
     ImportCheckDto: {
       additions: number;
@@ -2644,6 +2729,20 @@ export interface components {
        */
       wattHours?: string | null;
     };
+    PartClaimDto: {
+      /** @description What of that is to come out of a batch. */
+      awaited: string;
+      /** @description What of that it holds on the shelf. */
+      claimed: string;
+      kind: string;
+      /** @description What of that it holds nowhere. */
+      missing: string;
+      /** @description What it still needs. */
+      needed: string;
+      neededOn: string | null;
+      /** @description The number of the order or batch. */
+      reference: string;
+    };
     PartDto: {
       battery?: components['schemas']['PartBatteryDto'] | null;
       code: string;
@@ -2716,6 +2815,25 @@ export interface components {
       unitWeightG?: string | null;
       version: number;
     };
+    PartFiguresDto: {
+      /** @description In major units per stock unit. Not shown to assemblers. */
+      averageCost?: string | null;
+      belowReorderPoint: boolean;
+      claimed: string;
+      /** @description Usable and claimed by nobody; below zero when supply shrank under its claims. */
+      free: string;
+      /** @description Of that, what is held back. */
+      held: string;
+      /** @description How many days the free quantity lasts at the pace of the last 90 days; null without use. */
+      lastsDays: number | null;
+      /** @description All that lies on the shelf. */
+      onShelf: string;
+      /** @description By how much more is claimed than can be used; null when nothing is missing. */
+      short: string | null;
+      /** @description Of that, what may be issued: released, not expired, in no quarantine bin. */
+      usable: string;
+      value?: components['schemas']['MoneyDto'];
+    };
     PartInputDto: {
       battery?: components['schemas']['PartBatteryDto'] | null;
       code: string;
@@ -2749,6 +2867,36 @@ export interface components {
        */
       unitWeightG?: string | null;
     };
+    PartItemDto: {
+      /** @description In major units per stock unit. Not shown to assemblers. */
+      averageCost?: string | null;
+      belowReorderPoint: boolean;
+      bins: string[];
+      claimed: string;
+      code: string;
+      /** @description Usable and claimed by nobody; below zero when supply shrank under its claims. */
+      free: string;
+      /** @description Of that, what is held back. */
+      held: string;
+      /** @description How many days the free quantity lasts at the pace of the last 90 days; null without use. */
+      lastsDays: number | null;
+      measure: string;
+      name: string;
+      /** @description All that lies on the shelf. */
+      onShelf: string;
+      reorderPoint: string | null;
+      retired: boolean;
+      /** @description By how much more is claimed than can be used; null when nothing is missing. */
+      short: string | null;
+      traced: string;
+      /** @description Of that, what may be issued: released, not expired, in no quarantine bin. */
+      usable: string;
+      value?: components['schemas']['MoneyDto'];
+    };
+    PartPageDto: {
+      items: components['schemas']['PartItemDto'][];
+      total: number;
+    };
     PartParameterDto: {
       name: string;
       /** @description Of a number: its unit. */
@@ -2756,8 +2904,32 @@ export interface components {
       /** @description A decimal number, or a word. */
       value: string;
     };
+    PartPlaceDto: {
+      bin: string;
+      expired: boolean;
+      expiresOn: string | null;
+      kind: string;
+      lot: string;
+      quantity: string;
+      quarantine: boolean;
+      receivedOn: string | null;
+      status: string;
+      supplier: string | null;
+      supplierLot: string | null;
+    };
     PartRetireDto: {
       version: number;
+    };
+    PartStoryDto: {
+      claims: components['schemas']['PartClaimDto'][];
+      /** @description Of the average cost; not shown to assemblers. */
+      currency?: string;
+      figures: components['schemas']['PartFiguresDto'];
+      /** @description The latest, newest first. */
+      moves: components['schemas']['MoveDto'][];
+      part: components['schemas']['PartDto'];
+      places: components['schemas']['PartPlaceDto'][];
+      uses: components['schemas']['PartUseDto'][];
     };
     PartSupplierDto: {
       leadTimeDays?: number | null;
@@ -2766,6 +2938,15 @@ export interface components {
       /** @description The supplier's code. */
       supplier: string;
       supplierPartCode?: string | null;
+    };
+    PartUseDto: {
+      name: string;
+      part: string;
+      quantity: string;
+      revision: number | null;
+      /** @description component: a line of the bill; alternate: may stand in; contents: lies in a kit. */
+      role: string;
+      status: string | null;
     };
     PasswordChangeDto: {
       /** Format: password */
@@ -2909,6 +3090,15 @@ export interface components {
       currency: string;
       name: string;
       timeZone: string;
+    };
+    ShelfQueueDto: {
+      expiringLotCount: number;
+      expiringLots: components['schemas']['ExpiringLotDto'][];
+      heldLotCount: number;
+      heldLots: components['schemas']['HeldLotDto'][];
+      shortPartCount: number;
+      /** @description Claimed beyond what can be used first, then below the reorder point. */
+      shortParts: components['schemas']['ShortPartDto'][];
     };
     ShopAnswerDto: {
       /** @description Null until the owner has set the shop up. */
@@ -3109,6 +3299,18 @@ export interface components {
       /** @description `YYYY-MM-DD` */
       leavesBy: string | null;
     };
+    ShortPartDto: {
+      claimed: string;
+      free: string;
+      measure: string;
+      name: string;
+      part: string;
+      reorderPoint: string | null;
+      /** @description By how much more is claimed than can be used; null when only the reorder point is passed. */
+      short: string | null;
+      /** @description The one to order from first. */
+      supplier: string | null;
+    };
     SignInDto: {
       /** Format: email */
       email: string;
@@ -3159,6 +3361,24 @@ export interface components {
     };
     StockDocumentDto: {
       number: string;
+    };
+    StockValueDto: {
+      /** @description What the stock accounts carry; the same, at every moment. */
+      accountsBalance: components['schemas']['MoneyDto'];
+      items: components['schemas']['StockValueItemDto'][];
+      /** @description Of the whole shelf, whatever is searched for. */
+      shelfValue: components['schemas']['MoneyDto'];
+      total: number;
+    };
+    StockValueItemDto: {
+      /** @description The stock account it stands in. */
+      account: string;
+      averageCost: string;
+      measure: string;
+      name: string;
+      part: string;
+      quantity: string;
+      value: components['schemas']['MoneyDto'];
     };
     StripUnitDto: {
       finished: boolean;
@@ -4736,6 +4956,38 @@ export interface operations {
       };
     };
   };
+  Find_list: {
+    parameters: {
+      query: {
+        limit?: number;
+        /** @description A scanned code, or a few letters. */
+        q: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['FoundListDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   Accounts_makeFirstOwner: {
     parameters: {
       query?: never;
@@ -5438,6 +5690,50 @@ export interface operations {
       };
     };
   };
+  Shelf_listParts: {
+    parameters: {
+      query?: {
+        /** @description A bin's code: parts of which something lies there. */
+        bin?: string;
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description Only the ones no longer in use; otherwise only those that are. */
+        retired?: boolean;
+        /** @description Less is free than the reorder point, or more is claimed than can be used. */
+        short?: boolean;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+        /** @description A supplier's code: parts that can be bought there. */
+        supplier?: string;
+        traced?: 'count' | 'delivery' | 'single';
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PartPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   Parts_create: {
     parameters: {
       query?: never;
@@ -5460,6 +5756,36 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['PartDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Shelf_getPart: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PartStoryDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */
@@ -5909,6 +6235,34 @@ export interface operations {
           [name: string]: unknown;
         };
         content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Shelf_readQueue: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ShelfQueueDto'];
+        };
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {
@@ -6558,6 +6912,41 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['StockDocumentDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Shelf_readValue: {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StockValueDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */

@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { JournalModule } from '../journal/journal.module.js';
+import { PartsModule } from '../parts/parts.module.js';
 import { ConstraintSentences } from '../platform/errors/constraints.js';
 import { SettingsModule } from '../settings/settings.module.js';
 import { AdjustStockService } from './adjust-stock.service.js';
@@ -26,6 +27,16 @@ import { ReservationsRepository } from './reservations.repository.js';
 import { ReservationsService } from './reservations.service.js';
 import { ReversalsRepository } from './reversals.repository.js';
 import { ReverseDocumentService } from './reverse-document.service.js';
+import { PartFiguresRepository } from './part-figures.repository.js';
+import { PartFiguresService } from './part-figures.service.js';
+import { PartListRepository } from './part-list.repository.js';
+import { PartStoryRepository } from './part-story.repository.js';
+import { ShelfController } from './shelf.controller.js';
+import { ShelfPartsService } from './shelf-parts.service.js';
+import { ShelfQueueRepository } from './shelf-queue.repository.js';
+import { ShelfQueueService } from './shelf-queue.service.js';
+import { StockValueRepository } from './stock-value.repository.js';
+import { StockValueService } from './stock-value.service.js';
 import { StockLedgerRepository } from './stock-ledger.repository.js';
 import { StockLedgerService } from './stock-ledger.service.js';
 import { StockLines } from './stock-lines.service.js';
@@ -35,8 +46,8 @@ import { stockConstraints } from './stock.constraints.js';
 import { TransferStockService } from './transfer-stock.service.js';
 
 @Module({
-  imports: [SettingsModule, JournalModule],
-  controllers: [BinsController, DeliveriesController, LotsController, StockMovesController],
+  imports: [JournalModule, PartsModule, SettingsModule],
+  controllers: [BinsController, DeliveriesController, LotsController, ShelfController, StockMovesController],
   providers: [
     AdjustStockService,
     AvailabilityRepository,
@@ -59,13 +70,32 @@ import { TransferStockService } from './transfer-stock.service.js';
     ReservationsService,
     ReversalsRepository,
     ReverseDocumentService,
+    PartFiguresRepository,
+    PartFiguresService,
+    PartListRepository,
+    PartStoryRepository,
+    ShelfPartsService,
+    ShelfQueueRepository,
+    ShelfQueueService,
+    StockValueRepository,
+    StockValueService,
     StockLedgerRepository,
     StockLedgerService,
     StockLines,
     StockLookupRepository,
     TransferStockService,
   ],
-  exports: [BinsService, LotRegister, OpeningStockService, ReservationsService, StockLedgerService, StockLines],
+  exports: [
+    BinsService,
+    PartFiguresService,
+    ShelfQueueService,
+    StockValueService,
+    LotRegister,
+    OpeningStockService,
+    ReservationsService,
+    StockLedgerService,
+    StockLines,
+  ],
 })
 export class StockModule {
   constructor(sentences: ConstraintSentences) {
