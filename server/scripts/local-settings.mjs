@@ -46,7 +46,7 @@ export function fakesEnvironment({ ports, secrets, state }) {
   return {
     ...process.env,
     PAYMENTS_FAKE_PORT: String(ports.payments),
-    PAYMENTS_WEBHOOK_URL: `http://127.0.0.1:${ports.server}/api/payments/webhook`,
+    PAYMENTS_WEBHOOK_URL: `http://127.0.0.1:${ports.server}/api/payment-events`,
     PAYMENTS_WEBHOOK_SECRET: secrets.webhook,
     SMTP_PORT: String(ports.smtp),
     MAIL_PAGE_PORT: String(ports.mailPage),
