@@ -3500,7 +3500,7 @@ export interface components {
       part: components['schemas']['BillPartDto'];
       /** @description Positions from the made part down to this line. */
       path: number[];
-      /** @description What this place takes with its allowance for scrap, not rounded. */
+      /** @description What this place takes with its allowance for scrap, to four decimals. */
       quantity: string;
       quantityPer: string;
       scrapPercent: string;

@@ -10,7 +10,7 @@ const Ground = styled('section')(({ theme }) => ({
   '& > header > h2': { ...theme.typography.h2, margin: 0 },
   '& > header > h3': { ...theme.typography.h3, margin: 0 },
   '& > header': { display: 'flex', alignItems: 'baseline', gap: 16, marginBottom: 10 },
-  '& > header > :last-of-type:not(:first-of-type)': { marginLeft: 'auto' },
+  '& > header > div': { marginLeft: 'auto' },
 }));
 
 interface SheetProps {

@@ -73,7 +73,7 @@ export class TreeRowDto {
   part: BillPartDto;
   quantityPer: string;
   scrapPercent: string;
-  /** What this place takes with its allowance for scrap, not rounded. */
+  /** What this place takes with its allowance for scrap, to four decimals. */
   quantity: string;
   marks: string | null;
   alternates: string[];

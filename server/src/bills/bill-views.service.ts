@@ -1,7 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { explode, explodeIndented } from '@emberlot/shared/bill/explode';
 import { attempt } from '@emberlot/shared/errors/arithmetic-error';
-import { decimalText } from '@emberlot/shared/measure/decimal';
+import { type Decimal, decimalText } from '@emberlot/shared/measure/decimal';
 import { Database } from '../platform/database/database.js';
 import { AppError } from '../platform/errors/app-error.js';
 import { billsOf, issueDecimalsOf, partsOf } from './bill-arithmetic.js';
@@ -88,7 +88,7 @@ export class BillViewsService {
             path: row.path.map(Number),
             level: row.level,
             parent: row.parent,
-            quantity: decimalText(row.quantity.toSignificantDigits(12)),
+            quantity: decimalText(readable(row.quantity)),
             ...treeLine(line),
             madeBy: madeBy.get(row.part) ?? null,
           },
@@ -141,6 +141,11 @@ export class BillViewsService {
       })),
     };
   }
+}
+
+/** Four decimals, and for what is smaller four digits: a quotient that never ends is for reading only. */
+function readable(quantity: Decimal): Decimal {
+  return quantity.toDecimalPlaces(Math.max(4, 3 - quantity.e));
 }
 
 function linesByPlace(revisions: readonly BillRevision[]): ReadonlyMap<string, RevisionLine> {

@@ -54,9 +54,10 @@ export class ReleaseBillService {
 
 function refuseUnfit(draft: BillRevision): void {
   const faults = releaseFaults(draft);
-  const [first, ...others] = faults;
-  if (!first) return;
-  const sentence = others.length === 0 ? first.detail : `${faults.length} things stand against releasing this.`;
+  if (faults.length === 0) return;
+  const [first, second, third, ...others] = faults.map(({ detail }) => detail);
+  const rest = others.length > 0 ? `And ${others.length} more.` : undefined;
+  const sentence = [first, second, third, rest].filter((part) => part !== undefined).join(' ');
   throw new AppError('rule_broken', sentence, { faults });
 }
 

@@ -28,6 +28,8 @@ interface FormProps<Values extends FieldValues> {
   children: ReactNode;
   /** Names the form where the page has several. */
   label?: string;
+  /** For tables to type in: as wide as the page. */
+  wide?: boolean;
   /** What stands in the fields once the server has taken it. */
   after?: 'kept' | 'empty';
 }
@@ -40,6 +42,7 @@ export function Form<Values extends FieldValues>({
   onCancel,
   children,
   label,
+  wide = false,
   after = 'kept',
 }: FormProps<Values>): ReactElement {
   const prefix = useId();
@@ -77,7 +80,7 @@ export function Form<Values extends FieldValues>({
   return (
     <FormProvider {...form}>
       <FormFieldsContext value={fields}>
-        <Frame noValidate aria-label={label} onSubmit={submit}>
+        <Frame noValidate aria-label={label} onSubmit={submit} style={wide ? { maxWidth: 'none' } : undefined}>
           <ErrorSummary attempt={attempt} refusal={refusal} />
           {form.restored && form.formState.isDirty ? (
             <p className="kept">
