@@ -8,4 +8,9 @@ export const planFaults = {
   plan_lot_periods: 'An order cannot cover {periods} periods; it takes a whole number of at least one.',
   plan_lot_costs: 'An order cost of {order} with a holding cost of {holding} cannot be planned with.',
   plan_demand_negative: 'A need of {demand} is not a need.',
+  plan_periods: 'A plan of {count} periods cannot be made.',
+  plan_lead_time: 'A lead time of {leadTime} cannot be planned with; give a whole number, zero or more.',
+  plan_quantity: 'The quantity {quantity} of {part} cannot be planned with.',
+  plan_all_lost: 'The share of {part} that is lost, {share}, is not from 0 to below 1.',
+  plan_part_unknown: '{part}, used in {usedIn}, is not among the parts to plan.',
 } as const;
