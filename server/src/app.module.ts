@@ -13,6 +13,7 @@ import { PeopleModule } from './people/people.module.js';
 import { PlanningModule } from './planning/planning.module.js';
 import { PlatformModule } from './platform/platform.module.js';
 import { SettingsModule } from './settings/settings.module.js';
+import { ShippingModule } from './shipping/shipping.module.js';
 import { StockModule } from './stock/stock.module.js';
 import { SuppliersModule } from './suppliers/suppliers.module.js';
 import { UnitsModule } from './units/units.module.js';
@@ -40,6 +41,7 @@ import { UnitsModule } from './units/units.module.js';
     CatalogueModule,
     OrdersModule,
     PaymentsModule,
+    ShippingModule,
     // For the accountant
     FindModule,
   ],

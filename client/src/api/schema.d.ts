@@ -930,6 +930,170 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/parcels': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Parcels_list'];
+    put?: never;
+    /** Opens a parcel for an order; the one that is open already is given again. */
+    post: operations['Parcels_open'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parcels/{code}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Parcels_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parcels/{code}/carrier-answer': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** The owner writes down what the carrier answered. */
+    post: operations['Parcels_carrierAnswer'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parcels/{code}/dispatch': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Sends it off. */
+    post: operations['Parcels_dispatch'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parcels/{code}/items/{id}/taken-out': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Parcels_takeOut'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parcels/{code}/lithium': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    /** How it travels and what it weighs: the answer about lithium follows from it. */
+    put: operations['Parcels_sayLithium'];
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parcels/{code}/packed': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Parcels_close'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parcels/{code}/packing-slip': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Parcels_slip'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parcels/{code}/reopened': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Parcels_reopen'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/parcels/{code}/scans': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Parcels_scan'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/parts': {
     parameters: {
       query?: never;
@@ -1955,6 +2119,11 @@ export interface components {
       minutes: string;
       title: string;
     };
+    CarrierAnswerInput: {
+      /** @description Who was asked at the carrier, when, and what they said. */
+      note: string;
+      version: number;
+    };
     CharacteristicChangeDto: {
       after: components['schemas']['CharacteristicDto'] | null;
       before: components['schemas']['CharacteristicDto'] | null;
@@ -2247,6 +2416,11 @@ export interface components {
        * @description Since when: the draft was begun or the revision released.
        */
       since: string;
+    };
+    DispatchInput: {
+      carrier: string;
+      trackingCode: string | null;
+      version: number;
     };
     EmailChangeDto: {
       /** Format: password */
@@ -2545,6 +2719,23 @@ export interface components {
       password: string;
       token: string;
     };
+    LithiumInput: {
+      /** @description Charge of the batteries in percent of their rated capacity; asked for where they fly. */
+      chargePercent: number | null;
+      /** @enum {string} */
+      mode: 'cargo_aircraft' | 'letter_post' | 'passenger_aircraft' | 'road' | 'sea';
+      version: number;
+      /** @description Whether the watt-hours stand on the outside of each battery. */
+      wattHoursOnCase: boolean | null;
+      /** @description The whole parcel, weighed. */
+      weightG: number;
+    };
+    LithiumRuleDto: {
+      instruction: string;
+      properName: string;
+      rule: string;
+      unNumber: string;
+    };
     LotBatchDto: {
       number: string;
       part: string;
@@ -2677,6 +2868,10 @@ export interface components {
       act: string;
       sentence: string;
     };
+    OpenParcelInput: {
+      /** @description The order's number. */
+      order: string;
+    };
     OutboxMailDto: {
       attempts: number;
       createdAt: string;
@@ -2704,6 +2899,98 @@ export interface components {
     };
     OwnSessionsDto: {
       items: components['schemas']['OwnSessionDto'][];
+    };
+    PackedItemDto: {
+      bin: string;
+      id: number;
+      lot: string;
+      needId: number;
+      packedAt: string;
+      part: string;
+      quantity: string;
+      serial: string | null;
+    };
+    ParcelDto: {
+      address: string[];
+      carrier: string | null;
+      /** @description Cautions that go with what is in it. */
+      cautions: string[];
+      country: string;
+      items: components['schemas']['PackedItemDto'][];
+      lithium: components['schemas']['ParcelLithiumDto'];
+      needs: components['schemas']['ParcelNeedDto'][];
+      number: string;
+      openedAt: string;
+      order: string;
+      promisedOn: string;
+      recipient: string;
+      shippedAt: string | null;
+      state: components['schemas']['ParcelState'];
+      trackingCode: string | null;
+      version: number;
+      weightG: number | null;
+    };
+    ParcelLithiumDto: {
+      answer: string;
+      /** @description What the carrier answered, and who wrote it down. */
+      carrierAnswer: string | null;
+      caution: string;
+      chargePercent: number | null;
+      conditions: string[];
+      edition: string | null;
+      labels: string[];
+      mark: string | null;
+      mayLeave: boolean;
+      missing: string[];
+      mode: components['schemas']['ParcelMode'] | null;
+      papers: string[];
+      reasons: string[];
+      rules: components['schemas']['LithiumRuleDto'][];
+      /** @description The answer in a sentence. */
+      sentence: string;
+      wattHoursOnCase: boolean | null;
+    };
+    /** @enum {string} */
+    ParcelMode: 'cargo_aircraft' | 'letter_post' | 'passenger_aircraft' | 'road' | 'sea';
+    ParcelNeedDto: {
+      bag: string | null;
+      id: number;
+      measure: string;
+      packed: string;
+      part: string;
+      partName: string;
+      /** @description Where it lies, the lot to take first in front. */
+      places: components['schemas']['ParcelPlaceDto'][];
+      quantity: string;
+      /** @description What was ordered: the tool, or the kit that this is part of. */
+      title: string;
+      traced: string;
+    };
+    ParcelPageDto: {
+      items: components['schemas']['ParcelRowDto'][];
+      total: number;
+    };
+    ParcelPlaceDto: {
+      bin: string;
+      lot: string;
+      quantity: string;
+    };
+    ParcelRowDto: {
+      carrier: string | null;
+      country: string;
+      number: string;
+      openedAt: string;
+      order: string;
+      promisedOn: string;
+      recipient: string;
+      shippedAt: string | null;
+      state: components['schemas']['ParcelState'];
+      trackingCode: string | null;
+    };
+    /** @enum {string} */
+    ParcelState: 'dissolved' | 'packed' | 'packing' | 'shipped';
+    ParcelVersionInput: {
+      version: number;
     };
     PartBatteryDto: {
       cellCount?: number | null;
@@ -3075,6 +3362,27 @@ export interface components {
       /** @description In the file; the header is line 1. */
       line: number;
       sentence: string;
+    };
+    ScanAnswerDto: {
+      /** @description The bin that was scanned, to be sent with the next scan. */
+      bin: string | null;
+      parcel: components['schemas']['ParcelDto'];
+      /** @description In a sentence, to be read out. */
+      sentence: string;
+    };
+    ScanInput: {
+      /** @description The bin that was scanned before, where the thing lies in several. */
+      bin?: string;
+      /** @description What was scanned or typed: a serial number, a lot, a part, a bin, or the address on a unit's label. */
+      code: string;
+      /** @description The line of the contents that it is for; the next open one of the part when nothing is said. */
+      needId?: number;
+      /**
+       * Format: decimal
+       * @description How much of a lot; all that is still missing when nothing is said.
+       * @example 12.5
+       */
+      quantity?: string;
     };
     SessionDto: {
       /** @description To be sent back in `x-csrf-token` with every change; a new one comes with signing in and out. */
@@ -5678,6 +5986,370 @@ export interface operations {
           [name: string]: unknown;
         };
         content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parcels_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+        state?: 'dissolved' | 'packed' | 'packing' | 'shipped';
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ParcelPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parcels_open: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['OpenParcelInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ParcelDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parcels_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ParcelDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parcels_carrierAnswer: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['CarrierAnswerInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ParcelDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parcels_dispatch: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['DispatchInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ParcelDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parcels_takeOut: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ParcelDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parcels_sayLithium: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['LithiumInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ParcelDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parcels_close: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ParcelVersionInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ParcelDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parcels_slip: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parcels_reopen: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ParcelVersionInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ParcelDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Parcels_scan: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ScanInput'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ScanAnswerDto'];
+        };
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {

@@ -120,6 +120,11 @@ export class OrdersRepository {
     return handle.selectFrom('sales_order').selectAll().where('id', '=', orderId).executeTakeFirst();
   }
 
+  async findId(handle: Kysely<DB>, number: string): Promise<number | undefined> {
+    const row = await handle.selectFrom('sales_order').select('id').where('number', '=', number).executeTakeFirst();
+    return row?.id;
+  }
+
   async demandsOf(handle: Kysely<DB>, orderId: number): Promise<number[]> {
     const rows = await handle
       .selectFrom('order_line_need as n')

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import type { DB } from '@emberlot/db/database.types';
 import type { Kysely, Transaction } from 'kysely';
+import { Database } from '../platform/database/database.js';
 import { notFound } from '../platform/errors/app-error.js';
 import { OrdersRepository, type OrderRow } from './orders.repository.js';
 
@@ -10,7 +11,17 @@ export type OrderLines = Awaited<ReturnType<OrdersRepository['linesOf']>>;
 /** An order as other domains see it. Every action on an order takes its lock here first. */
 @Injectable()
 export class OrdersService {
-  constructor(private readonly repository: OrdersRepository) {}
+  constructor(
+    private readonly database: Database,
+    private readonly repository: OrdersRepository,
+  ) {}
+
+  /** @throws AppError `not_found` */
+  async idOf(number: string): Promise<number> {
+    const id = await this.repository.findId(this.database.handle, number);
+    if (id === undefined) throw notFound('order');
+    return id;
+  }
 
   /** @throws AppError `not_found` */
   async get(handle: Kysely<DB>, orderId: number): Promise<Order> {
