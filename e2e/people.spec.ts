@@ -25,8 +25,8 @@ test('somebody asked to join follows the link in the mail and is known by role',
 
 test('a buyer signs up, and the page knows them', async ({ page, product }) => {
   const buyer = await addCustomer(product, 'Robin Buyer', 'robin@buyer.example');
-  await page.goto('/');
   await signIn(page, buyer);
+  await page.goto('/');
   const session = await page.evaluate(async () => (await fetch('/api/session')).json());
   expect(session).toMatchObject({ person: { email: 'robin@buyer.example', role: 'customer' } });
 });

@@ -69,8 +69,18 @@ export class Caller {
     return { 'x-csrf-token': this.#token };
   }
 
-  #change(method: string, path: string, data?: object, headers: Record<string, string> = {}): Promise<APIResponse> {
-    return this.context.fetch(path, { method, data, headers: { ...this.#headers(), ...headers } });
+  /** As the product's own pages do: a form token that another page has outdated is read again once. */
+  async #change(
+    method: string,
+    path: string,
+    data?: object,
+    headers: Record<string, string> = {},
+  ): Promise<APIResponse> {
+    const send = () => this.context.fetch(path, { method, data, headers: { ...this.#headers(), ...headers } });
+    const answer = await send();
+    if (answer.status() !== 403 || !(await answer.text()).includes('"stale_form"')) return answer;
+    await this.#rememberToken(await this.context.get('/api/session'));
+    return send();
   }
 
   async #rememberToken(answer: APIResponse): Promise<void> {

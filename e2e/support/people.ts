@@ -55,7 +55,7 @@ export async function callerOf(product: Product, person: Person): Promise<Caller
   return caller;
 }
 
-/** Signs the page's browser in without going through the form. */
+/** Signs the page's browser in without going through the form; call it before opening a page. */
 export async function signIn(page: Page, person: Person): Promise<Caller> {
   const caller = await Caller.over(page.request);
   await caller.signIn(person.email, person.password);
