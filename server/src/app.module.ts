@@ -16,6 +16,7 @@ import { SettingsModule } from './settings/settings.module.js';
 import { ShippingModule } from './shipping/shipping.module.js';
 import { StockModule } from './stock/stock.module.js';
 import { SuppliersModule } from './suppliers/suppliers.module.js';
+import { TestingModule } from './testing/testing.module.js';
 import { UnitsModule } from './units/units.module.js';
 
 /** Everything the server is made of; a new module is added to its row. */
@@ -34,6 +35,7 @@ import { UnitsModule } from './units/units.module.js';
     InvoicingModule,
     // Making
     UnitsModule,
+    TestingModule,
     BuildsModule,
     PlanningModule,
     ImportsModule,

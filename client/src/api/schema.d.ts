@@ -101,6 +101,23 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/batches/{number}/made-pieces': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Puts made pieces on the shelf, of a part that is not followed one by one. */
+    post: operations['Batches_completePieces'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/batches/{number}/pick-list': {
     parameters: {
       query?: never;
@@ -580,6 +597,70 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/faults': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Testing_listFaults'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/faults/{number}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Testing_openFault'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/faults/{number}/no-fault': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Testing_noFault'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/faults/{number}/rework': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Testing_rework'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/find': {
     parameters: {
       query?: never;
@@ -608,6 +689,23 @@ export interface paths {
     put?: never;
     /** Makes the first owner, while there is nobody yet. */
     post: operations['Accounts_makeFirstOwner'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/first-passes': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** How many units passed the first time they were measured. */
+    get: operations['Testing_firstPasses'];
+    put?: never;
+    post?: never;
     delete?: never;
     options?: never;
     head?: never;
@@ -1637,6 +1735,39 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/units/{serial}/completion': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Puts a sound unit on the shelf. */
+    post: operations['Batches_complete'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/units/{serial}/faults': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Testing_report'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/units/{serial}/fitted-lots': {
     parameters: {
       query?: never;
@@ -1648,6 +1779,56 @@ export interface paths {
     put?: never;
     /** A lot scanned to a unit: the record then says exactly that it is in it. */
     post: operations['Batches_fitLot'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/units/{serial}/readings': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** One reading, applied once by its key; the run it belongs to begins and ends by itself. */
+    post: operations['Testing_record'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/units/{serial}/scrapping': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Gives a unit up for good. */
+    post: operations['Batches_scrap'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/units/{serial}/test-runs': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Testing_list'];
+    put?: never;
+    post?: never;
     delete?: never;
     options?: never;
     head?: never;
@@ -2208,6 +2389,9 @@ export interface components {
       items: components['schemas']['ClosedDayDto'][];
       total: number;
     };
+    CompletionDto: {
+      bin: string;
+    };
     ComponentDto: {
       code: string;
       /** @description Whether it has a released bill of its own. */
@@ -2464,6 +2648,36 @@ export interface components {
       part: string;
       quantity: string;
     };
+    FaultDto: {
+      action: string | null;
+      batch: string;
+      cause: string | null;
+      closedAt: string | null;
+      foundAt: string;
+      foundBy: string | null;
+      id: number;
+      number: string;
+      /** @enum {string|null} */
+      outcome: 'no_fault' | 'reworked' | 'scrapped' | null;
+      part: string;
+      partName: string;
+      /** @description The run that failed, if a measurement found it. */
+      run: number | null;
+      serial: string;
+      step: string | null;
+      version: number;
+      what: string;
+    };
+    FaultInputDto: {
+      /** @description At which step of the batch it was seen. */
+      step?: number | null;
+      /** @description What is wrong. */
+      what: string;
+    };
+    FaultPageDto: {
+      items: components['schemas']['FaultDto'][];
+      total: number;
+    };
     FieldFaultDto: {
       code: string;
       detail: string;
@@ -2480,6 +2694,11 @@ export interface components {
       sample: string;
       title: string | null;
     };
+    FinishedUnitDto: {
+      document: string;
+      lot: string;
+      serial: string;
+    };
     FirstOwnerDto: {
       /** Format: email */
       email: string;
@@ -2488,6 +2707,17 @@ export interface components {
       password: string;
       /** @description Printed when the server starts, while nobody can sign in yet. */
       setupCode: string;
+    };
+    FirstPassDto: {
+      /** @description Units whose first complete run is known. */
+      measured: number;
+      name: string;
+      part: string;
+      /** @description Of them, how many passed it. */
+      passed: number;
+    };
+    FirstPassListDto: {
+      items: components['schemas']['FirstPassDto'][];
     };
     FittedLotDto: {
       /** @description A lot that was picked for this line. */
@@ -2816,6 +3046,12 @@ export interface components {
       part: components['schemas']['BillPartDto'];
       quantity: string;
     };
+    MadePiecesDto: {
+      bin: string;
+      /** @description Nothing more comes of this batch: what is missing is lost. */
+      last: boolean;
+      quantity: number;
+    };
     /** @enum {string} */
     MailState: 'given_up' | 'sent' | 'uncertain' | 'waiting';
     MissingPartDto: {
@@ -2867,6 +3103,11 @@ export interface components {
       /** @description Names the act for a program: `claim`, `pick`, `start_building`, `build`, `none`. */
       act: string;
       sentence: string;
+    };
+    NoFaultInputDto: {
+      /** @description Why it is none. */
+      reason: string;
+      version: number;
     };
     OpenParcelInput: {
       /** @description The order's number. */
@@ -3332,6 +3573,34 @@ export interface components {
       vatNote: string | null;
       vatRate: string | null;
     };
+    ReadingInputDto: {
+      /** @description Of a yes-or-no characteristic. */
+      answer?: boolean | null;
+      /**
+       * Format: uuid
+       * @description Made afresh for each reading: sent again with the same one, it is applied once.
+       */
+      clientKey: string;
+      /** @description The person looked again at a reading that seemed to have slipped by a factor, and it stands. */
+      confirmed?: boolean;
+      /** @description When it was measured, by the device it was typed on. */
+      measuredAt: string;
+      /** @description Which characteristic of the test plan, by its position. */
+      position: number;
+      /** @description Of a measured characteristic: the number with a point, in its unit, with every digit that the instrument gives. */
+      reading?: string | null;
+      /** @description The run it was measured for: the one under way, or the one after the last. */
+      run: number;
+    };
+    ReadingResultDto: {
+      /** @description The fault that the run opened, if it failed. */
+      fault: string | null;
+      run: number;
+      /** @enum {string|null} */
+      runVerdict: 'fail' | 'pass' | null;
+      /** @enum {string} */
+      verdict: 'outside' | 'within';
+    };
     ReversalInputDto: {
       /** @description Why it was wrong. */
       reason: string;
@@ -3355,6 +3624,15 @@ export interface components {
     RevisionVersionDto: {
       version: number;
     };
+    ReworkInputDto: {
+      /** @description What was done about it. */
+      action: string;
+      /** @description Why it was so. */
+      cause: string;
+      /** @description Time at the bench. */
+      minutes: string;
+      version: number;
+    };
     /** @enum {string} */
     Role: 'accountant' | 'assembler' | 'customer' | 'owner';
     RowFaultDto: {
@@ -3362,6 +3640,25 @@ export interface components {
       /** @description In the file; the header is line 1. */
       line: number;
       sentence: string;
+    };
+    RunReadingDto: {
+      answer: boolean | null;
+      /** @enum {string} */
+      kind: 'numeric' | 'yes_no';
+      /** @description The limits it was judged by. */
+      lowerLimit: string | null;
+      measuredAt: string;
+      name: string;
+      position: number;
+      /** @description As it was typed. */
+      reading: string | null;
+      recordedBy: string;
+      /** @description Whether a later reading took its place. */
+      replaced: boolean;
+      unit: string | null;
+      upperLimit: string | null;
+      /** @enum {string} */
+      verdict: 'outside' | 'within';
     };
     ScanAnswerDto: {
       /** @description The bin that was scanned, to be sent with the next scan. */
@@ -3383,6 +3680,9 @@ export interface components {
        * @example 12.5
        */
       quantity?: string;
+    };
+    ScrapDto: {
+      reason: string;
     };
     SessionDto: {
       /** @description To be sent back in `x-csrf-token` with every change; a new one comes with signing in and out. */
@@ -3781,6 +4081,19 @@ export interface components {
       /** @description What building all of them takes from the shelf. */
       taken: string;
     };
+    TestRunDto: {
+      measuredAt: string | null;
+      readings: components['schemas']['RunReadingDto'][];
+      run: number;
+      startedAt: string;
+      /**
+       * @description Worked out when each characteristic has a reading.
+       * @enum {string|null}
+       */
+      verdict: 'fail' | 'pass' | null;
+      voidedAt: string | null;
+      voidReason: string | null;
+    };
     TransferInputDto: {
       lines: components['schemas']['TransferLineDto'][];
       note?: string | null;
@@ -3820,6 +4133,12 @@ export interface components {
       part: components['schemas']['BillPartDto'];
       /** @description Rounded up once per bill to what can be handed out. */
       quantity: string;
+    };
+    UnitRunsDto: {
+      /** @description The run that the next reading is for. */
+      nextRun: number;
+      runs: components['schemas']['TestRunDto'][];
+      serial: string;
     };
     UseDto: {
       /** @description Whether it is only an alternate of the line. */
@@ -4129,6 +4448,43 @@ export interface operations {
     requestBody: {
       content: {
         'application/json': components['schemas']['IssueInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BatchDocumentDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_completePieces: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['MadePiecesDto'];
       };
     };
     responses: {
@@ -5264,6 +5620,141 @@ export interface operations {
       };
     };
   };
+  Testing_listFaults: {
+    parameters: {
+      query?: {
+        /** @description Not closed yet. */
+        open?: boolean;
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['FaultPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Testing_openFault: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['FaultDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Testing_noFault: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['NoFaultInputDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['FaultDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Testing_rework: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ReworkInputDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['FaultDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   Find_list: {
     parameters: {
       query: {
@@ -5315,6 +5806,34 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['SessionDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Testing_firstPasses: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['FirstPassListDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */
@@ -7766,6 +8285,80 @@ export interface operations {
       };
     };
   };
+  Batches_complete: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path: {
+        serial: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['CompletionDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['FinishedUnitDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Testing_report: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path: {
+        serial: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['FaultInputDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['FaultDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   Batches_fitLot: {
     parameters: {
       query?: never;
@@ -7786,6 +8379,102 @@ export interface operations {
           [name: string]: unknown;
         };
         content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Testing_record: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        serial: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ReadingInputDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ReadingResultDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Batches_scrap: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        serial: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ScrapDto'];
+      };
+    };
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Testing_list: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        serial: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['UnitRunsDto'];
+        };
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {

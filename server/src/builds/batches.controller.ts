@@ -15,10 +15,21 @@ import {
 } from './batch.dto.js';
 import { BatchesService } from './batches.service.js';
 import { BuildBatchService } from './build-batch.service.js';
+import { FinishUnitService } from './finish-unit.service.js';
 import { GiveBackService } from './give-back.service.js';
 import { PickBatchService } from './pick-batch.service.js';
 import { PickListService } from './pick-list.service.js';
-import { BatchDocumentDto, FittedLotDto, IssueInputDto, PickListDto, StepTickDto } from './picking.dto.js';
+import {
+  BatchDocumentDto,
+  CompletionDto,
+  FinishedUnitDto,
+  FittedLotDto,
+  IssueInputDto,
+  MadePiecesDto,
+  PickListDto,
+  ScrapDto,
+  StepTickDto,
+} from './picking.dto.js';
 import { PlanBatchService } from './plan-batch.service.js';
 
 @Controller()
@@ -31,6 +42,7 @@ export class BatchesController {
     private readonly picking: PickBatchService,
     private readonly givingBack: GiveBackService,
     private readonly building: BuildBatchService,
+    private readonly finishing: FinishUnitService,
   ) {}
 
   @Get('batches')
@@ -135,5 +147,38 @@ export class BatchesController {
     @CurrentUser() person: SignedInUser,
   ): Promise<void> {
     await this.building.fitLot(serial, input, person);
+  }
+
+  /** Puts a sound unit on the shelf. */
+  @Post('units/:serial/completion')
+  @Creates()
+  async complete(
+    @SerialParam() serial: string,
+    @Body() input: CompletionDto,
+    @CurrentUser() person: SignedInUser,
+  ): Promise<FinishedUnitDto> {
+    return this.finishing.complete(serial, input, person);
+  }
+
+  /** Gives a unit up for good. */
+  @Post('units/:serial/scrapping')
+  @HttpCode(204)
+  async scrap(
+    @SerialParam() serial: string,
+    @Body() input: ScrapDto,
+    @CurrentUser() person: SignedInUser,
+  ): Promise<void> {
+    await this.finishing.scrap(serial, input, person);
+  }
+
+  /** Puts made pieces on the shelf, of a part that is not followed one by one. */
+  @Post('batches/:number/made-pieces')
+  @Creates()
+  async completePieces(
+    @CodeParam('document', 'number') number: string,
+    @Body() input: MadePiecesDto,
+    @CurrentUser() person: SignedInUser,
+  ): Promise<BatchDocumentDto> {
+    return { document: await this.finishing.completePieces(number, input, person) };
   }
 }
