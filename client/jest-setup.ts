@@ -6,5 +6,5 @@ import { configure } from '@testing-library/react';
 window.scrollTo = () => undefined;
 
 /** A page's module is compiled when it is first gone to. */
-configure({ asyncUtilTimeout: 8000 });
-jest.setTimeout(30_000);
+configure({ asyncUtilTimeout: 20_000 });
+jest.setTimeout(60_000);

@@ -28,7 +28,9 @@ export const queryClient: QueryClient = new QueryClient({
     onError: (error, _variables, _result, { meta }) => {
       if (!meta?.showsRefusal) notify(sentenceOf(error).sentence, { tone: 'hot' });
     },
-    onSettled: async (_data, _error, _variables, _result, { meta }) => {
+    onSettled: async (_data, error, _variables, _result, { meta }) => {
+      // A refusal has changed nothing. Where nothing answered, the change may have been made all the same.
+      if (error instanceof ApiProblem && error.status >= 400 && error.status < 500) return;
       await Promise.all((meta?.touches ?? []).map((queryKey) => queryClient.invalidateQueries({ queryKey })));
     },
   }),

@@ -1,12 +1,8 @@
 import { Fragment, type ReactElement } from 'react';
 import { Tag } from './tag/tag';
-import { tagWords, type TagKind } from './tag/tag-kinds';
+import { isTagKind, type TagKind } from './tag/tag-kinds';
 
 type Piece = { text: string } | { kind: TagKind; code: string } | { name: string };
-
-function isKind(word: string): word is TagKind {
-  return Object.hasOwn(tagWords, word);
-}
 
 /**
  * Takes a sentence apart: `{order:O-2648-031} can't leave: the last {name:Heron 140} failed.`
@@ -17,7 +13,7 @@ export function piecesOf(sentence: string): readonly Piece[] {
     if (piece === '') return [];
     const [, word = '', rest = ''] = /^\{([a-z]+):([^{}]+)\}$/.exec(piece) ?? [];
     if (word === 'name') return [{ name: rest }];
-    return isKind(word) ? [{ kind: word, code: rest }] : [{ text: piece }];
+    return isTagKind(word) ? [{ kind: word, code: rest }] : [{ text: piece }];
   });
 }
 

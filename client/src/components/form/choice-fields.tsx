@@ -6,10 +6,13 @@ import OutlinedInput from '@mui/material/OutlinedInput';
 import Radio from '@mui/material/Radio';
 import RadioGroup from '@mui/material/RadioGroup';
 import Select from '@mui/material/Select';
+import { styled } from '@mui/material/styles';
 import type { ReactElement, ReactNode } from 'react';
 import { useController } from 'react-hook-form';
 import { Field, type FieldProps } from './field';
 import { useFieldId } from './field-names';
+
+const Group = styled('fieldset')({ display: 'flex', flexWrap: 'wrap', margin: 0, padding: 0, border: 0 });
 
 export interface Choice {
   value: string;
@@ -69,6 +72,39 @@ export function RadioInput({ choices, ...field }: Omit<ChoiceProps, 'none'>): Re
   );
 }
 
+/** Any number of a few; the value is a list of the chosen ones. */
+export function ManyInput({ choices, ...field }: Omit<ChoiceProps, 'none'>): ReactElement {
+  return (
+    <Field
+      {...field}
+      render={({ value, onChange, onBlur, ref }, { id, ...described }) => {
+        const chosen: readonly string[] = Array.isArray(value) ? value : [];
+        const toggle = (choice: string, on: boolean): void => {
+          onChange(choices.map((each) => each.value).filter((each) => (each === choice ? on : chosen.includes(each))));
+        };
+        return (
+          <Group aria-label={field.label} aria-describedby={described['aria-describedby']} onBlur={onBlur}>
+            {choices.map((choice, place) => (
+              <FormControlLabel
+                key={choice.value}
+                label={choice.label}
+                control={
+                  <Checkbox
+                    size="small"
+                    checked={chosen.includes(choice.value)}
+                    onChange={(_, on) => toggle(choice.value, on)}
+                    slotProps={{ input: place === 0 ? { id, ref } : {} }}
+                  />
+                }
+              />
+            ))}
+          </Group>
+        );
+      }}
+    />
+  );
+}
+
 interface CheckProps {
   name: string;
   label: ReactNode;
@@ -78,7 +114,7 @@ interface CheckProps {
 }
 
 export function CheckInput({ name, label, hint, mustBeTicked }: CheckProps): ReactElement {
-  const id = useFieldId(name);
+  const id = useFieldId(name, typeof label === 'string' ? label : name);
   const validate = (value: unknown): string | true => (mustBeTicked && value !== true ? mustBeTicked : true);
   const { field, fieldState } = useController({ name, rules: { validate } });
   const fault = fieldState.error?.message;

@@ -30,23 +30,25 @@ interface FieldFrameProps extends FieldProps {
 
 /** Label above, control, then the error or the hint; every field of the product is drawn by this. */
 export function Field({ name, label, hint, required, rules, disabled, render, width }: FieldFrameProps): ReactElement {
-  const id = useFieldId(name);
+  const id = useFieldId(name, label);
   const needed = typeof required === 'string' ? required : `${label} is needed.`;
   const { field, fieldState } = useController({ name, rules: { ...rules, required: required ? needed : undefined } });
   const fault = fieldState.error?.message;
   const noteId = `${id}-note`;
   return (
-    <FormControl error={Boolean(fault)} disabled={disabled} sx={{ width: width ?? '100%' }}>
+    <FormControl error={Boolean(fault)} disabled={disabled} fullWidth>
       <FormLabel htmlFor={id} sx={{ mb: 0.5 }}>
         {label}
         {required ? null : <span style={{ fontWeight: 400 }}> (if any)</span>}
       </FormLabel>
-      {render(field, {
-        id,
-        'aria-describedby': fault || hint ? noteId : undefined,
-        'aria-invalid': Boolean(fault),
-        'aria-required': required ? true : undefined,
-      })}
+      <div style={{ width, maxWidth: '100%', display: 'grid' }}>
+        {render(field, {
+          id,
+          'aria-describedby': fault || hint ? noteId : undefined,
+          'aria-invalid': Boolean(fault),
+          'aria-required': required ? true : undefined,
+        })}
+      </div>
       {fault || hint ? (
         <FormHelperText id={noteId}>
           {fault ? <span aria-hidden="true">✕ </span> : null}

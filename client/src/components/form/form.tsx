@@ -1,12 +1,12 @@
 import Button from '@mui/material/Button';
 import { styled } from '@mui/material/styles';
-import { useId, useState, type FormEvent, type ReactElement, type ReactNode } from 'react';
+import type { FormEvent, ReactElement, ReactNode } from 'react';
 import { FormProvider, type FieldValues } from 'react-hook-form';
-import { ApiProblem, sentenceOf } from '../../lib/problem';
 import { ErrorSummary } from './error-summary';
 import { FormFieldsContext } from './field-names';
-import { placeFaults } from './server-faults';
+import { StalePanel } from './stale-panel';
 import type { DraftForm } from './use-draft-form';
+import { useFormSending } from './use-form-sending';
 
 const Frame = styled('form')(({ theme }) => ({
   display: 'grid',
@@ -32,60 +32,45 @@ interface FormProps<Values extends FieldValues> {
   wide?: boolean;
   /** What stands in the fields once the server has taken it. */
   after?: 'kept' | 'empty';
+  /**
+   * For a thing with a version, which the form holds as its value `version`: the form's values in another state of it.
+   * They are taken from what `onSubmit` gives, and from what somebody else kept: an edit that collides shows both states
+   * and lets the person choose.
+   */
+  valuesOf?: (current: unknown) => Values;
 }
 
 /** Every form: errors in a summary and beside their fields, nothing lost when it is refused, the act always below left. */
-export function Form<Values extends FieldValues>({
-  form,
-  onSubmit,
-  submitLabel,
-  onCancel,
-  children,
-  label,
-  wide = false,
-  after = 'kept',
-}: FormProps<Values>): ReactElement {
-  const prefix = useId();
-  const [fields] = useState(() => ({ prefix, names: new Set<string>() }));
-  const [refusal, setRefusal] = useState<readonly string[]>([]);
-  const [attempt, setAttempt] = useState(0);
-  const { isSubmitting } = form.formState;
-
-  const send = async (values: Values): Promise<void> => {
-    try {
-      await onSubmit(values);
-      form.discardDraft();
-      form.reset(after === 'empty' ? undefined : values);
-    } catch (error) {
-      setRefusal(refusalOf(error));
-    }
-  };
-  const refusalOf = (error: unknown): readonly string[] => {
-    if (!(error instanceof ApiProblem) || error.errors.length === 0) return [sentenceOf(error).sentence];
-    const homeless = placeFaults(form, error, fields.names);
-    return homeless.length > 0 ? homeless.map((fault) => fault.detail) : [];
-  };
+export function Form<Values extends FieldValues>(props: FormProps<Values>): ReactElement {
+  const { form, onSubmit, submitLabel, onCancel, children, label, wide = false, after = 'kept', valuesOf } = props;
+  const sending = useFormSending({ form, onSubmit, after, valuesOf });
+  const { isSubmitting, isDirty } = form.formState;
   const submit = (event: FormEvent): void => {
     // A dialog's form sits inside the page's in React's tree; its submit is not the page's.
     event.stopPropagation();
-    setRefusal([]);
-    void form
-      .handleSubmit(send)(event)
-      .then(() => setAttempt((count) => count + 1));
+    void sending.submit(event);
   };
-  const startAfresh = (): void => {
+  const cancel = (): void => {
     form.discardDraft();
-    form.reset(form.formState.defaultValues as Values);
+    onCancel?.();
   };
   return (
     <FormProvider {...form}>
-      <FormFieldsContext value={fields}>
+      <FormFieldsContext value={sending.fields}>
         <Frame noValidate aria-label={label} onSubmit={submit} style={wide ? { maxWidth: 'none' } : undefined}>
-          <ErrorSummary attempt={attempt} refusal={refusal} />
-          {form.restored && form.formState.isDirty ? (
+          <ErrorSummary attempt={sending.attempt} refusal={sending.refusal} />
+          {sending.theirs ? (
+            <StalePanel
+              theirs={sending.theirs}
+              mine={form.getValues()}
+              onTakeTheirs={sending.takeTheirs}
+              onKeepMine={sending.keepMine}
+            />
+          ) : null}
+          {form.restored && isDirty ? (
             <p className="kept">
               This is what you typed before.{' '}
-              <Button size="small" variant="text" onClick={startAfresh}>
+              <Button size="small" variant="text" onClick={sending.startAfresh}>
                 Start afresh
               </Button>
             </p>
@@ -96,13 +81,7 @@ export function Form<Values extends FieldValues>({
               {submitLabel}
             </Button>
             {onCancel ? (
-              <Button
-                variant="text"
-                onClick={() => {
-                  form.discardDraft();
-                  onCancel();
-                }}
-              >
+              <Button variant="text" onClick={cancel}>
                 Cancel
               </Button>
             ) : null}

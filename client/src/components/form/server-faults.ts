@@ -17,7 +17,7 @@ export function fieldOfPointer(pointer: string): string {
 export function placeFaults<Values extends FieldValues>(
   form: UseFormReturn<Values>,
   problem: ApiProblem,
-  fields: ReadonlySet<string>,
+  fields: { has: (name: string) => boolean },
 ): readonly FieldFault[] {
   const homeless: FieldFault[] = [];
   for (const fault of problem.errors) {

@@ -3,6 +3,7 @@ import type { ReactNode } from 'react';
 import { formatDayShort } from '../../lib/format-time';
 import type { MoneyAmount } from '../../lib/format-money';
 import { Money, Quantity, When } from '../figures';
+import { VisuallyHidden } from '../visually-hidden';
 import { Tag } from '../tag/tag';
 import type { TagKind } from '../tag/tag-kinds';
 
@@ -44,6 +45,18 @@ export function tagColumn<Row extends GridValidRowModel>(
     return thing ? <Tag kind={kind} code={thing.code} story={thing.story} /> : null;
   };
   return column(field, title, draw, { width: 170, flex: 0, hideable: false, ...more });
+}
+
+/** The one thing that can be done with each line, without a title that is seen. */
+export function actColumn<Row extends GridValidRowModel>(
+  title: string,
+  draw: (row: Row) => ReactNode,
+  width: number,
+): GridColDef<Row> {
+  return {
+    ...column('act', title, draw, { sortable: false, flex: 0, width, hideable: false }),
+    renderHeader: () => <VisuallyHidden>{title}</VisuallyHidden>,
+  };
 }
 
 function rightColumn<Row extends GridValidRowModel>(

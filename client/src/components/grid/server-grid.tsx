@@ -91,7 +91,7 @@ function WideRows<Row extends GridValidRowModel>({
   };
   return (
     // The column layout lets the grid be as tall as its rows, so that the page scrolls and not a box within it.
-    <Box sx={{ display: 'flex', flexDirection: 'column', minHeight: 160 }}>
+    <Box sx={{ display: 'flex', flexDirection: 'column', minHeight: grid.rows.length === 0 ? 160 : undefined }}>
       <DataGrid<Row>
         aria-label={label}
         rows={grid.rows}

@@ -50,3 +50,7 @@ export function tagAddress(kind: TagKind, code: string): string | undefined {
 export function hasOutline(kind: TagKind): kind is OutlinedKind {
   return kind in tagEdges;
 }
+
+export function isTagKind(word: string): word is TagKind {
+  return Object.hasOwn(tagWords, word);
+}

@@ -7,15 +7,25 @@ import { notify } from '../../../lib/notify';
 import { askForNewAddress, changePassword, useRename, type Profile } from '../api/account';
 import { NewPasswordInput } from './new-password-input';
 
+type NameValues = Pick<Profile, 'name' | 'version'>;
+
+const nameValues = ({ name, version }: NameValues): NameValues => ({ name, version });
+
 export function NameForm({ profile }: { profile: Profile }): ReactElement {
   const rename = useRename();
-  const form = useDraftForm({ name: 'profile-name', defaultValues: { name: profile.name } });
-  const send = async ({ name }: { name: string }): Promise<void> => {
-    await rename.mutateAsync({ name, version: profile.version });
+  const form = useDraftForm({ name: 'profile-name', defaultValues: nameValues(profile) });
+  const send = async (values: NameValues): Promise<Profile> => {
+    const kept = await rename.mutateAsync(values);
     notify('Your name is changed.');
+    return kept;
   };
   return (
-    <Form form={form} onSubmit={send} submitLabel="Keep this name" label="Name">
+    <Form
+      form={form}
+      onSubmit={send}
+      submitLabel="Keep this name"
+      valuesOf={(current) => nameValues(current as Profile)}
+    >
       <TextInput name="name" label="Name" autoComplete="name" longest={textLimit.name} required />
     </Form>
   );
@@ -33,7 +43,7 @@ export function PasswordForm(): ReactElement {
     notify('Your password is changed. You are signed out everywhere else.');
   };
   return (
-    <Form form={form} onSubmit={send} after="empty" submitLabel="Change the password" label="Password">
+    <Form form={form} onSubmit={send} after="empty" submitLabel="Change the password">
       <PasswordInput name="currentPassword" label="Password so far" autoComplete="current-password" required />
       <NewPasswordInput name="newPassword" label="New password" />
     </Form>
@@ -48,7 +58,7 @@ export function AddressForm(): ReactElement {
     notify(`A link is on its way to ${values.email}. The address counts once you have opened it.`);
   };
   return (
-    <Form form={form} onSubmit={send} after="empty" submitLabel="Send a link to it" label="E-mail address">
+    <Form form={form} onSubmit={send} after="empty" submitLabel="Send a link to it">
       <TextInput
         name="email"
         label="New address"

@@ -37,7 +37,7 @@ export function Component(): ReactElement {
       <Columns>
         <div>
           <Sheet title="What you are called">
-            <NameForm key={profile.data.version} profile={profile.data} />
+            <NameForm profile={profile.data} />
           </Sheet>
           <Sheet title="Where you are signed in">
             <SessionList />

@@ -5,8 +5,18 @@ export function actionWords(action: string): string {
   return action.replaceAll('_', ' ').replace('.', ': ');
 }
 
+const subjectNames: Readonly<Record<string, string>> = {
+  app_user: 'person',
+  shop: 'the shop',
+  shop_closed_day: 'closed day',
+  outbox_mail: 'mail',
+};
+
 export function subjectWords({ subjectKind, subjectCode, subjectId }: AuditEntry): string {
-  return [subjectKind.replaceAll('_', ' '), subjectCode ?? (subjectId === null ? '' : `no. ${subjectId}`)]
+  return [
+    subjectNames[subjectKind] ?? subjectKind.replaceAll('_', ' '),
+    subjectCode ?? (subjectId === null ? '' : `no. ${subjectId}`),
+  ]
     .join(' ')
     .trim();
 }

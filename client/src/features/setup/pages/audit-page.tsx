@@ -6,6 +6,8 @@ import { ServerGrid } from '../../../components/grid/server-grid';
 import { useServerGrid, type GridFilter } from '../../../components/grid/use-server-grid';
 import { PageHeading } from '../../../components/page-heading';
 import { EmptyState } from '../../../components/states';
+import { Tag } from '../../../components/tag/tag';
+import { isTagKind } from '../../../components/tag/tag-kinds';
 import { auditQuery, type AuditEntry } from '../api/audit';
 import { AuditEntryDialog } from '../components/audit-entry-dialog';
 import { actionWords, subjectWords } from '../components/audit-words';
@@ -36,7 +38,7 @@ function auditColumns(show: (entry: AuditEntry) => void): readonly GridColDef<Au
     whenColumn('recordedAt', 'When', (entry) => entry.recordedAt, { hideable: false }),
     column('actorName', 'Who', (entry) => <Who entry={entry} />, { sortable: false, minWidth: 200 }),
     column('action', 'Did what', (entry) => actionWords(entry.action), { sortable: false, minWidth: 200 }),
-    column('subject', 'To what', (entry) => subjectWords(entry), { sortable: false, minWidth: 200 }),
+    column('subject', 'To what', (entry) => <Subject entry={entry} />, { sortable: false, minWidth: 200 }),
     column(
       'values',
       'Values',
@@ -49,6 +51,13 @@ function auditColumns(show: (entry: AuditEntry) => void): readonly GridColDef<Au
       { sortable: false, flex: 0, width: 170 },
     ),
   ];
+}
+
+function Subject({ entry }: { entry: AuditEntry }): ReactElement {
+  const { subjectKind, subjectCode } = entry;
+  if (subjectCode && subjectKind !== 'document' && isTagKind(subjectKind))
+    return <Tag kind={subjectKind} code={subjectCode} />;
+  return <span>{subjectWords(entry)}</span>;
 }
 
 export function Component(): ReactElement {

@@ -3,7 +3,7 @@ import type { GridColDef } from '@mui/x-data-grid';
 import { useMemo, useState, type ReactElement } from 'react';
 import { Link, useSearchParams } from 'react-router-dom';
 import { Flag } from '../../../components/flag';
-import { column } from '../../../components/grid/columns';
+import { actColumn, column } from '../../../components/grid/columns';
 import { ServerGrid } from '../../../components/grid/server-grid';
 import { useServerGrid, type GridFilter } from '../../../components/grid/use-server-grid';
 import { PageHeading } from '../../../components/page-heading';
@@ -26,15 +26,14 @@ function staffColumns(change: (member: StaffMember) => void): readonly GridColDe
     column('email', 'E-mail address', (member) => member.email, { minWidth: 220 }),
     column('role', 'Role', (member) => roleLabel(member.role)),
     column('status', 'Here', (member) => <StatusFlag status={member.status} />, { minWidth: 180 }),
-    column(
-      'act',
-      '',
+    actColumn(
+      'Change',
       (member) => (
         <Button size="small" onClick={() => change(member)} aria-label={`Change ${member.name}`}>
           Change
         </Button>
       ),
-      { sortable: false, flex: 0, width: 110, hideable: false },
+      110,
     ),
   ];
 }

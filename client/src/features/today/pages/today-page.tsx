@@ -3,6 +3,7 @@ import { styled } from '@mui/material/styles';
 import { useQuery } from '@tanstack/react-query';
 import type { ReactElement } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
+import { sessionQuery } from '../../../api/session';
 import { DefinitionList } from '../../../components/definition-list';
 import { Money } from '../../../components/figures';
 import { Flag } from '../../../components/flag';
@@ -10,7 +11,7 @@ import { PageHeading } from '../../../components/page-heading';
 import { QueueList, type QueueItem } from '../../../components/queue-list';
 import { Sentence } from '../../../components/sentence';
 import { Sheet } from '../../../components/sheet';
-import { ErrorState, LoadingState } from '../../../components/states';
+import { EmptyState, ErrorState, LoadingState } from '../../../components/states';
 import { Strip } from '../../../components/strip/strip';
 import { Tag } from '../../../components/tag/tag';
 import { formatDayShort } from '../../../lib/format-time';
@@ -33,7 +34,38 @@ const Page = styled('div')(({ theme }) => ({
   [theme.breakpoints.down('md')]: { '& .two': { gridTemplateColumns: 'minmax(0, 1fr)', gap: 28, marginTop: 32 } },
 }));
 
+/** Nothing of the shop can begin before it has a name, an address and a currency. */
+function FirstStep(): ReactElement {
+  return (
+    <>
+      <PageHeading title="The shop is not set up yet" documentTitle="Today" />
+      <EmptyState
+        title="Begin with its name, address and currency"
+        action={
+          <Button variant="contained" component={Link} to="/setup/shop">
+            Set up the shop
+          </Button>
+        }
+      >
+        Then enter days on which you are closed, VAT, and where you send to; then parts and what lies on the shelf.
+      </EmptyState>
+    </>
+  );
+}
+
 export function Component(): ReactElement {
+  const session = useQuery(sessionQuery).data;
+  if (session?.shop === null && session.person?.role === 'owner') {
+    return (
+      <Page>
+        <FirstStep />
+      </Page>
+    );
+  }
+  return <TodayQueue />;
+}
+
+function TodayQueue(): ReactElement {
   const today = useQuery(todayQuery);
   return (
     <Page>
