@@ -33,42 +33,42 @@ const pointersOf = (body: unknown) => (body as { errors: { pointer: string }[] }
 
 describe('setting up the shop', () => {
   it('is asked for while there is none, and done once', async () => {
-    expect((await owner.get('/api/shop').expect(200)).body).toEqual({ shop: null, zone: 'Europe/Dublin' });
-    expect((await owner.put('/api/shop', { ...shop, version: 1 }).expect(409)).body).toMatchObject({
+    expect((await owner.get('/api/shop-settings').expect(200)).body).toEqual({ shop: null, zone: 'Europe/Dublin' });
+    expect((await owner.put('/api/shop-settings', { ...shop, version: 1 }).expect(409)).body).toMatchObject({
       code: 'wrong_state',
     });
-    const { body } = await owner.post('/api/shop', shop).expect(201);
+    const { body } = await owner.post('/api/shop-settings', shop).expect(201);
     expect(body).toMatchObject({
       name: shop.name,
       workingWeekdays: [1, 2, 3, 4, 5],
       zone: 'Europe/Dublin',
       version: 1,
     });
-    await owner.post('/api/shop', shop).expect(409);
+    await owner.post('/api/shop-settings', shop).expect(409);
   });
 
   it('says what is wrong beside the field', async () => {
     const bad = { ...shop, countryCode: 'IRL', workingWeekdays: [1, 8], checkoutHoldMinutes: 5, iban: 'x', version: 1 };
-    const { body } = await owner.put('/api/shop', bad).expect(400);
+    const { body } = await owner.put('/api/shop-settings', bad).expect(400);
     expect(new Set(pointersOf(body))).toEqual(
       new Set(['/countryCode', '/workingWeekdays', '/checkoutHoldMinutes', '/iban']),
     );
-    const currency = await owner.put('/api/shop', { ...shop, currency: 'EUX', version: 1 }).expect(400);
+    const currency = await owner.put('/api/shop-settings', { ...shop, currency: 'EUX', version: 1 }).expect(400);
     expect(pointersOf(currency.body)).toEqual(['/currency']);
   });
 
   it('is edited from the version that was seen', async () => {
-    await owner.put('/api/shop', { ...shop, city: 'Millhollow', version: 1 }).expect(200);
-    const stale = await owner.put('/api/shop', { ...shop, version: 1 }).expect(409);
+    await owner.put('/api/shop-settings', { ...shop, city: 'Millhollow', version: 1 }).expect(200);
+    const stale = await owner.put('/api/shop-settings', { ...shop, version: 1 }).expect(409);
     expect(stale.body).toMatchObject({ code: 'changed_meanwhile', current: { city: 'Millhollow', version: 2 } });
   });
 
   it('is the owner’s alone, while all of the staff may read the countries', async () => {
-    await (await app.visitor()).get('/api/shop').expect(401);
+    await (await app.visitor()).get('/api/shop-settings').expect(401);
     const assembler = await app.agentFor('assembler');
-    await assembler.get('/api/shop').expect(403);
-    await assembler.post('/api/shop', shop).expect(403);
-    await assembler.put('/api/shop', { ...shop, version: 2 }).expect(403);
+    await assembler.get('/api/shop-settings').expect(403);
+    await assembler.post('/api/shop-settings', shop).expect(403);
+    await assembler.put('/api/shop-settings', { ...shop, version: 2 }).expect(403);
     const { body } = await assembler.get('/api/countries').expect(200);
     const { items, total } = body as { items: { code: string; inUnion: boolean }[]; total: number };
     expect(total).toBe(249);

@@ -18,17 +18,17 @@ import { ShopSettingsService } from './shop-settings.service.js';
 export class ShopController {
   constructor(private readonly settings: ShopSettingsService) {}
 
-  @Get('shop')
+  @Get('shop-settings')
   async read(): Promise<ShopAnswerDto> {
     return this.settings.read();
   }
 
-  @Post('shop')
+  @Post('shop-settings')
   async setUp(@Body() input: ShopInputDto, @CurrentUser() person: SignedInUser): Promise<ShopDto> {
     return this.settings.setUp(input, person);
   }
 
-  @Put('shop')
+  @Put('shop-settings')
   async edit(@Body() input: ShopEditDto, @CurrentUser() person: SignedInUser): Promise<ShopDto> {
     return this.settings.edit(input, person);
   }

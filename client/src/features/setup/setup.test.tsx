@@ -70,8 +70,8 @@ describe('the shop’s form', () => {
   it('sets the shop up the first time', async () => {
     const calls = serve({
       ...base,
-      'GET /api/shop': () => ({ body: { shop: null, zone: 'Europe/Dublin' } }),
-      'POST /api/shop': () => ({ status: 201, body: shop }),
+      'GET /api/shop-settings': () => ({ body: { shop: null, zone: 'Europe/Dublin' } }),
+      'POST /api/shop-settings': () => ({ status: 201, body: shop }),
     });
     const { container } = at('/setup/shop');
     expect(await screen.findByRole('heading', { name: 'Set up the shop' })).toBeVisible();
@@ -90,8 +90,8 @@ describe('the shop’s form', () => {
     await userEvent.selectOptions(screen.getByRole('combobox', { name: 'Country' }), 'IE');
     expect(await faultsOfAccess(container)).toEqual([]);
     await userEvent.click(screen.getByRole('button', { name: 'Open the shop' }));
-    await waitFor(() => expect(calls.some(({ route }) => route === 'POST /api/shop')).toBe(true));
-    expect(calls.find(({ route }) => route === 'POST /api/shop')?.body).toMatchObject({
+    await waitFor(() => expect(calls.some(({ route }) => route === 'POST /api/shop-settings')).toBe(true));
+    expect(calls.find(({ route }) => route === 'POST /api/shop-settings')?.body).toMatchObject({
       labourRateMinor: 3250,
       workingWeekdays: [1, 2, 3, 4, 5],
     });
@@ -103,8 +103,8 @@ describe('an edit that somebody else was faster with', () => {
     const kept: unknown[] = [];
     serve({
       ...base,
-      'GET /api/shop': () => ({ body: { shop, zone: 'Europe/Dublin' } }),
-      'PUT /api/shop': ({ body }) => {
+      'GET /api/shop-settings': () => ({ body: { shop, zone: 'Europe/Dublin' } }),
+      'PUT /api/shop-settings': ({ body }) => {
         const sent = body as Shop;
         if (sent.version === 1) {
           const answer = refusal(409, 'changed_meanwhile', 'Somebody changed this.');

@@ -13,7 +13,7 @@ export type OutboxMail = Dto<'OutboxMailDto'>;
 
 export const shopQuery = queryOptions({
   queryKey: ['shop'],
-  queryFn: ({ signal }) => answer(api.GET('/api/shop', { signal })),
+  queryFn: ({ signal }) => answer(api.GET('/api/shop-settings', { signal })),
 });
 
 export const countriesQuery = queryOptions({
@@ -57,10 +57,11 @@ function useChange<Body, Given>(
   return useMutation({ mutationFn: send, meta: { touches: [touches, ['session']], showsRefusal } });
 }
 
-export const useSetUpShop = () => useChange(['shop'], (body: ShopInput) => answer(api.POST('/api/shop', { body })));
+export const useSetUpShop = () =>
+  useChange(['shop'], (body: ShopInput) => answer(api.POST('/api/shop-settings', { body })));
 
 export const useEditShop = () =>
-  useChange(['shop'], (body: Dto<'ShopEditDto'>) => answer(api.PUT('/api/shop', { body })));
+  useChange(['shop'], (body: Dto<'ShopEditDto'>) => answer(api.PUT('/api/shop-settings', { body })));
 
 export const useCloseDay = () =>
   useChange(['shop'], (body: Dto<'ClosedDayInputDto'>) => answer(api.POST('/api/shop/closed-days', { body })));
