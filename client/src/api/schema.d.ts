@@ -1415,6 +1415,22 @@ export interface paths {
     };
     /** Who the shop is, and where it delivers. */
     get: operations['Storefront_front'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/shop-settings': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Shop_read'];
     put: operations['Shop_edit'];
     post: operations['Shop_setUp'];
     delete?: never;
@@ -7481,6 +7497,34 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['ShopFrontDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Shop_read: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ShopAnswerDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */

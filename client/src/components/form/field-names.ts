@@ -14,7 +14,7 @@ export const FormFieldsContext = createContext<FormFields>({ prefix: 'field', na
  * Makes a field known to its form.
  * @returns the id of its control, for its label, its error and the summary's link
  */
-export function useFieldId(name: string, label: string): string {
+export function useFieldId(name: string, label: string = name): string {
   const { prefix, names } = use(FormFieldsContext);
   useEffect(() => {
     names.set(name, label);
