@@ -13,4 +13,8 @@ export const planFaults = {
   plan_quantity: 'The quantity {quantity} of {part} cannot be planned with.',
   plan_all_lost: 'The share of {part} that is lost, {share}, is not from 0 to below 1.',
   plan_part_unknown: '{part}, used in {usedIn}, is not among the parts to plan.',
+  plan_promise_input:
+    'What is there, what comes and what is promised must be quantities for the same periods, none below zero.',
+  plan_not_available: '{quantity} cannot be promised for period {period}; {free} are free.',
+  plan_load: 'The time of {id} cannot be planned with: {minutes} minutes.',
 } as const;
