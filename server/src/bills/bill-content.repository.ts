@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import type { DB } from '@emberlot/db/database.types';
-import { sql, type Transaction } from 'kysely';
+import { sql, type Kysely, type Transaction } from 'kysely';
 import type { CheckedContent, CheckedLine } from './bill-content.js';
 
 /** One component of a bill in force or in draft: its part, and what it may contain. */
@@ -39,6 +39,22 @@ export class BillContentRepository {
       join part parent on parent.id = edge.parent_id
       join part component on component.id = edge.component_id
     `.execute(trx);
+    return rows;
+  }
+
+  /** What contains what, leaving out the drafts of these parts, which are to hold something else. */
+  async edgesOutside(handle: Kysely<DB>, codes: readonly string[]): Promise<BillEdge[]> {
+    const { rows } = await sql<BillEdge>`
+      select distinct parent.code as parent, component.code as component
+      from bill_revision r
+      join part parent on parent.id = r.part_id
+      join bill_line l on l.revision_id = r.id
+      cross join lateral (
+        select l.part_id union all select a.part_id from bill_line_alternate a where a.line_id = l.id
+      ) inside
+      join part component on component.id = inside.part_id
+      where r.status = 'released' or (r.status = 'draft' and parent.code <> all(${sql.val([...codes])}::text[]))
+    `.execute(handle);
     return rows;
   }
 
@@ -83,6 +99,15 @@ export class BillContentRepository {
       .where('status', '=', 'draft')
       .executeTakeFirst();
     return result.numDeletedRows === 1n;
+  }
+
+  /** Empties drafts of their lines, before the lines of all of them are written anew. */
+  async clearLines(trx: Transaction<DB>, revisionIds: readonly number[]): Promise<void> {
+    if (revisionIds.length === 0) return;
+    await trx
+      .deleteFrom('bill_line')
+      .where('revision_id', 'in', [...revisionIds])
+      .execute();
   }
 
   async supersede(trx: Transaction<DB>, partId: number, at: Date): Promise<void> {

@@ -2,6 +2,7 @@ import { attempt } from '@emberlot/shared/errors/arithmetic-error';
 import { decimal } from '@emberlot/shared/measure/decimal';
 import { isStockMeasure } from '@emberlot/shared/measure/stock-measures';
 import { positiveStockQuantity } from '@emberlot/shared/measure/stock-quantity';
+import type { Plain } from '../platform/api/plain.js';
 import type { FieldFault } from '../platform/errors/app-error.js';
 import type { BillContentDto, BillLineInputDto, BuildStepInputDto, CharacteristicInputDto } from './bill.dto.js';
 import type { BillPart, BillRevision, RevisionCharacteristic, RevisionLine, RevisionStep } from './bill-revision.js';
@@ -31,6 +32,21 @@ export function contentOf(revision: BillRevision): CheckedContent {
     lines: revision.lines.map((line) => without(line, 'id')),
     steps: revision.steps.map((step) => without(step, 'id', 'position')),
     testPlan: revision.testPlan.map((characteristic) => without(characteristic, 'id', 'position')),
+  };
+}
+
+/** What a revision holds, as it would be typed. */
+export function inputOf(revision: BillRevision): Plain<BillContentDto> {
+  const { lines, steps, testPlan } = contentOf(revision);
+  return {
+    note: revision.note,
+    lines: lines.map((line) => ({
+      ...line,
+      part: line.part.code,
+      alternates: line.alternates.map(({ code }) => code),
+    })),
+    steps: [...steps],
+    testPlan: [...testPlan],
   };
 }
 

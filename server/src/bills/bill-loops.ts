@@ -15,14 +15,23 @@ export function loopThrough(
   components: readonly string[],
   edges: readonly BillEdge[],
 ): readonly string[] | undefined {
-  const sets = new Map<string, Set<string>>([[owner, new Set(components)]]);
-  for (const { parent, component } of edges) sets.set(parent, (sets.get(parent) ?? new Set()).add(component));
-  const bills: Bills = new Map([...sets].map(([parent, set]) => [parent, [...set].map(line)]));
-  const codes = attempt(() => lowLevelCodes(bills));
+  const own = components.map((component) => ({ parent: owner, component }));
+  const codes = attempt(() => lowLevelCodes(billsOfEdges([...own, ...edges])));
   if (codes.ok) return undefined;
   const way = String(codes.fault.details['cycle']).split(' → ').slice(0, -1);
   const from = way.indexOf(owner);
   return [...way.slice(from), ...way.slice(0, from), owner];
+}
+
+/** What contains what, as the arithmetic reads bills; quantities play no role. */
+export function billsOfEdges(edges: readonly BillEdge[]): Bills {
+  const sets = new Map<string, Set<string>>();
+  for (const { parent, component } of edges) {
+    const own = sets.get(parent);
+    if (own) own.add(component);
+    else sets.set(parent, new Set([component]));
+  }
+  return new Map([...sets].map(([parent, set]) => [parent, [...set].map(line)]));
 }
 
 function line(part: string) {

@@ -2,6 +2,7 @@ import { Module } from '@nestjs/common';
 import { ConstraintSentences } from '../platform/errors/constraints.js';
 import { BillContentRepository } from './bill-content.repository.js';
 import { BillListsRepository } from './bill-lists.repository.js';
+import { BillTablesService } from './bill-tables.service.js';
 import { BillViewsService } from './bill-views.service.js';
 import { billsConstraints } from './bills.constraints.js';
 import { BillsController } from './bills.controller.js';
@@ -22,6 +23,7 @@ import { WhereUsedRepository } from './where-used.repository.js';
     BillListsRepository,
     BillsRepository,
     BillsService,
+    BillTablesService,
     BillViewsService,
     ContentsRepository,
     ContentsService,
@@ -30,7 +32,7 @@ import { WhereUsedRepository } from './where-used.repository.js';
     RevisionReader,
     WhereUsedRepository,
   ],
-  exports: [BillsService, ContentsService, DraftBillsService, ReleaseBillService],
+  exports: [BillsService, BillTablesService, ContentsService, DraftBillsService, ReleaseBillService],
 })
 export class BillsModule {
   constructor(sentences: ConstraintSentences) {

@@ -41,7 +41,7 @@ export class BillsRepository {
     const rows = await handle
       .selectFrom('part')
       .select(partColumns('part'))
-      .where('code', 'in', [...new Set(codes)])
+      .where(sql<boolean>`part.code = any(${sql.val([...new Set(codes)])}::text[])`)
       .execute();
     return new Map(rows.map((row) => [row.partCode, partFrom(row)]));
   }
@@ -54,6 +54,17 @@ export class BillsRepository {
       .where('number', '=', number)
       .executeTakeFirst();
     return row?.id;
+  }
+
+  /** Drafts and released revisions of the parts. */
+  async idsInHand(handle: Kysely<DB>, partIds: readonly number[]): Promise<number[]> {
+    const rows = await handle
+      .selectFrom('bill_revision')
+      .select('id')
+      .where(sql<boolean>`part_id = any(${sql.val([...partIds])}::bigint[])`)
+      .where('status', '<>', 'superseded')
+      .execute();
+    return rows.map(({ id }) => id);
   }
 
   async releasedIds(handle: Kysely<DB>, partIds: readonly number[]): Promise<number[]> {

@@ -36,11 +36,21 @@ export class DraftBillsService {
       const part = await this.bills.part(trx, code);
       if (part.retired)
         throw new AppError('wrong_state', `${code} is retired. Bring it back before designing it anew.`);
-      const from = input.from === 'released' ? await this.bills.getReleased(trx, part.id) : undefined;
-      await this.content.lockAll(trx);
-      const draft = await this.#insert(trx, person, part, { note: null, content: from && contentOf(from) });
+      const draft = await this.begin(trx, person, part, input.from);
       return this.reader.read(trx, draft);
     });
+  }
+
+  /** Begins a draft in the caller's transaction. @throws AppError as `create` */
+  async begin(
+    trx: Transaction<DB>,
+    person: SignedInUser,
+    part: BillPart,
+    beginning: NewDraftDto['from'],
+  ): Promise<number> {
+    await this.content.lockAll(trx);
+    const from = beginning === 'released' ? await this.bills.getReleased(trx, part.id) : undefined;
+    return this.#insert(trx, person, part, { note: null, content: from && contentOf(from) });
   }
 
   /**

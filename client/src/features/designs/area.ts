@@ -5,6 +5,7 @@ export const designs: AreaParts = {
     { label: 'Bills', to: '/designs/bills' },
     { label: 'Kits', to: '/designs/kits' },
     { label: 'Where used', to: '/designs/where-used' },
+    { label: 'Import', to: '/shelf/imports/bill', roles: ['owner'] },
   ],
   routes: [
     { index: true, lazy: () => import('./pages/queue-page') },
