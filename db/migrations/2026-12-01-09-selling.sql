@@ -186,7 +186,7 @@ comment on table payment is 'Money received for an order. Append only.';
 create table payment_review (
   id bigint generated always as identity primary key,
   order_id bigint references sales_order (id),
-  provider_event_id text references payment_event (provider_event_id),
+  provider_event_id text references payment_event (provider_event_id) deferrable initially deferred,
   what text not null,
   created_at timestamptz not null,
   settled_at timestamptz,

@@ -3,6 +3,9 @@ import { InvoicingModule } from '../invoicing/invoicing.module.js';
 import { CatalogueModule } from '../catalogue/catalogue.module.js';
 import { SettingsModule } from '../settings/settings.module.js';
 import { StockModule } from '../stock/stock.module.js';
+import { BuyerOrdersController } from './buyer-orders.controller.js';
+import { BuyerOrdersRepository } from './buyer-orders.repository.js';
+import { BuyerOrdersService } from './buyer-orders.service.js';
 import { OrderClaimsService } from './order-claims.service.js';
 import { OrderPaidMailTask } from './order-paid-mail.task.js';
 import { OrderNeedsRepository } from './order-needs.repository.js';
@@ -12,7 +15,10 @@ import { PlaceOrderService } from './place-order.service.js';
 
 @Module({
   imports: [SettingsModule, StockModule, CatalogueModule, InvoicingModule],
+  controllers: [BuyerOrdersController],
   providers: [
+    BuyerOrdersRepository,
+    BuyerOrdersService,
     OrderClaimsService,
     OrderNeedsRepository,
     OrderPaidMailTask,
@@ -20,6 +26,6 @@ import { PlaceOrderService } from './place-order.service.js';
     OrdersService,
     PlaceOrderService,
   ],
-  exports: [OrderClaimsService, OrdersService, PlaceOrderService],
+  exports: [BuyerOrdersService, OrderClaimsService, OrdersService, PlaceOrderService],
 })
 export class OrdersModule {}

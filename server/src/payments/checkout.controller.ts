@@ -1,4 +1,6 @@
-import { Body, Controller, Post } from '@nestjs/common';
+import { Body, Controller, Headers, HttpCode, Param, Post } from '@nestjs/common';
+import { PaymentPageDto } from '../orders/buyer-orders.dto.js';
+import { BuyerOrdersService } from '../orders/buyer-orders.service.js';
 import { MaybeUser, Public } from '../platform/auth/access.js';
 import type { SignedInUser } from '../platform/auth/signed-in-user.js';
 import { AppError } from '../platform/errors/app-error.js';
@@ -9,7 +11,10 @@ import { CheckoutService } from './checkout.service.js';
 @Controller('shop/orders')
 @Public()
 export class CheckoutController {
-  constructor(private readonly checkout: CheckoutService) {}
+  constructor(
+    private readonly checkout: CheckoutService,
+    private readonly orders: BuyerOrdersService,
+  ) {}
 
   /** Orders what is in the basket, with obligation to pay. */
   @Post()
@@ -36,5 +41,17 @@ export class CheckoutController {
         },
       },
     );
+  }
+
+  /** Opens the payment page of an order that is not paid yet. */
+  @Post(':number/payment-pages')
+  @HttpCode(200)
+  async payAgain(
+    @Param('number') number: string,
+    @Headers('x-order-token') token: string | undefined,
+    @MaybeUser() user: SignedInUser | null,
+  ): Promise<PaymentPageDto> {
+    const { id } = await this.orders.find(number, { user, token });
+    return { paymentPage: await this.checkout.payAgain(id) };
   }
 }

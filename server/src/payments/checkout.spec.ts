@@ -190,4 +190,66 @@ describe('Checkout', () => {
     const available = await orderOf(listingId, { email: 'later@fernhollow.example' });
     expect(available.status).toBe(201);
   });
+
+  it('shows an order to who holds its link, and to nobody else', async () => {
+    const listingId = await offered(1);
+    const { body } = await orderOf(listingId);
+    const visitor = await app.visitor();
+    const path = `/api/shop/orders/${body.number}`;
+    const own = await visitor.get(path).set('x-order-token', body.guestToken).expect(200);
+    expect(own.body).toMatchObject({ number: body.number, canPay: true });
+    const foreign = await visitor.get(path).set('x-order-token', 'x'.repeat(43)).expect(404);
+    const missing = await visitor.get('/api/shop/orders/O-0000-000').expect(404);
+    expect(foreign.body.detail).toBe(missing.body.detail);
+    await visitor.get(path).expect(404);
+    await (await app.agentFor('customer')).get(path).expect(404);
+  });
+
+  it('lets a buyer pay again after the page ran out, while the goods are there', async () => {
+    const listingId = await offered(1);
+    const { body } = await orderOf(listingId);
+    const session = new URL(body.paymentPage).pathname.split('/').at(-1) ?? '';
+    await fake.control('POST', `/control/sessions/${session}/expire`, {});
+    await fake.webhooksSettled();
+    const visitor = await app.visitor();
+    const again = await visitor
+      .post(`/api/shop/orders/${body.number}/payment-pages`)
+      .set('x-order-token', body.guestToken)
+      .expect(200);
+    await pay(again.body.paymentPage);
+    const order = await visitor.get(`/api/shop/orders/${body.number}`).set('x-order-token', body.guestToken);
+    expect(order.body).toMatchObject({ canPay: false, invoices: [expect.objectContaining({ kind: 'invoice' })] });
+    await visitor
+      .post(`/api/shop/orders/${body.number}/payment-pages`)
+      .set('x-order-token', body.guestToken)
+      .expect(409);
+  });
+
+  it('waits for a bank, and frees the goods when it refuses', async () => {
+    const listingId = await offered(1);
+    const { body } = await orderOf(listingId);
+    const session = new URL(body.paymentPage).pathname.split('/').at(-1) ?? '';
+    await fake.control('POST', `/control/sessions/${session}/pay-later`, {});
+    await fake.webhooksSettled();
+    app.clock.advance({ days: 2 });
+    expect((await orderOf(listingId, { expectedGross: 13_530, expectedDay: '2099-01-01' })).status).toBe(409);
+    await fake.control('POST', `/control/sessions/${session}/settle`, { outcome: 'failed' });
+    await fake.webhooksSettled();
+    expect((await orderOf(listingId, { email: 'next@fernhollow.example' })).status).toBe(201);
+  });
+
+  it('holds back goods when another amount was paid', async () => {
+    const listingId = await offered(1);
+    const { body } = await orderOf(listingId);
+    await fake.control('POST', '/control/next-payment', { amount: 1 });
+    await pay(body.paymentPage);
+    const order = await orderRow(body.number);
+    expect(await paymentsOf(order.id)).toEqual([]);
+    const reviews = await app.database.handle
+      .selectFrom('payment_review')
+      .selectAll()
+      .where('order_id', '=', order.id)
+      .execute();
+    expect(reviews).toHaveLength(1);
+  });
 });

@@ -21,4 +21,6 @@ export const publicRoutes: Readonly<Record<string, string>> = {
   'POST /api/shop/quotes': 'prices a basket, claims nothing',
   'POST /api/shop/orders': 'guests order too',
   'POST /api/payment-events': 'the payments service signs what it sends',
+  'GET /api/shop/orders/:number': 'needs the token of the link, or to be signed in as its buyer',
+  'POST /api/shop/orders/:number/payment-pages': 'as above',
 };
