@@ -2998,7 +2998,7 @@ ALTER TABLE ONLY public.payment_review
     ADD CONSTRAINT payment_review_order_id_fkey FOREIGN KEY (order_id) REFERENCES public.sales_order(id);
 
 ALTER TABLE ONLY public.payment_review
-    ADD CONSTRAINT payment_review_provider_event_id_fkey FOREIGN KEY (provider_event_id) REFERENCES public.payment_event(provider_event_id);
+    ADD CONSTRAINT payment_review_provider_event_id_fkey FOREIGN KEY (provider_event_id) REFERENCES public.payment_event(provider_event_id) DEFERRABLE INITIALLY DEFERRED;
 
 ALTER TABLE ONLY public.payment_review
     ADD CONSTRAINT payment_review_settled_by_fkey FOREIGN KEY (settled_by) REFERENCES public.app_user(id);

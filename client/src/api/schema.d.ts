@@ -1028,6 +1028,23 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/own-orders': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** The orders of the customer who is signed in. */
+    get: operations['BuyerOrders_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/parcels': {
     parameters: {
       query?: never;
@@ -1514,6 +1531,40 @@ export interface paths {
     put?: never;
     /** Orders what is in the basket, with obligation to pay. */
     post: operations['Checkout_order'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/shop/orders/{number}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** One order, for its buyer: signed in, or by the token of the link. */
+    get: operations['BuyerOrders_open'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/shop/orders/{number}/payment-pages': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Opens the payment page of an order that is not paid yet. */
+    post: operations['Checkout_payAgain'];
     delete?: never;
     options?: never;
     head?: never;
@@ -2315,6 +2366,65 @@ export interface components {
       /** @description For one made. */
       minutes: string;
       title: string;
+    };
+    BuyerInvoiceDto: {
+      gross: components['schemas']['MoneyDto'];
+      id: number;
+      issuedOn: string;
+      /** @enum {string} */
+      kind: 'credit_note' | 'invoice';
+      number: string;
+    };
+    BuyerOrderDto: {
+      addressLine: string;
+      addressLine2: string | null;
+      canPay: boolean;
+      city: string;
+      company: string | null;
+      country: string;
+      delivery: components['schemas']['MoneyDto'];
+      events: components['schemas']['BuyerOrderEventDto'][];
+      gross: components['schemas']['MoneyDto'];
+      invoices: components['schemas']['BuyerInvoiceDto'][];
+      lines: components['schemas']['BuyerOrderLineDto'][];
+      net: components['schemas']['MoneyDto'];
+      number: string;
+      placedAt: string;
+      postcode: string;
+      /** @description The day it was promised to leave; it never changes. */
+      promisedOn: string;
+      recipient: string;
+      /** @description Where it stands, in a sentence. */
+      standing: string;
+      units: components['schemas']['BuyerUnitDto'][];
+      vat: components['schemas']['MoneyDto'];
+      vatNote: string | null;
+    };
+    BuyerOrderEventDto: {
+      /** @description ISO instant. */
+      at: string;
+      /** @description What happened, in a sentence. */
+      what: string;
+    };
+    BuyerOrderLineDto: {
+      net: components['schemas']['MoneyDto'];
+      quantity: number;
+      title: string;
+      vatRate: string;
+    };
+    BuyerOrderRowDto: {
+      gross: components['schemas']['MoneyDto'];
+      number: string;
+      placedAt: string;
+      standing: string;
+    };
+    BuyerOrdersDto: {
+      items: components['schemas']['BuyerOrderRowDto'][];
+    };
+    BuyerUnitDto: {
+      /** @description Opens the unit's public page. */
+      pageToken: string;
+      serial: string;
     };
     CarrierAnswerInput: {
       /** @description Who was asked at the carrier, when, and what they said. */
@@ -3497,6 +3607,10 @@ export interface components {
       currentPassword: string;
       /** Format: password */
       newPassword: string;
+    };
+    PaymentPageDto: {
+      /** @description Null when the payments service did not answer. */
+      paymentPage: string | null;
     };
     PersonDto: {
       email: string;
@@ -6533,6 +6647,34 @@ export interface operations {
       };
     };
   };
+  BuyerOrders_list: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuyerOrdersDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   Parcels_list: {
     parameters: {
       query?: {
@@ -7778,6 +7920,66 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['CheckedOutDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  BuyerOrders_open: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuyerOrderDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Checkout_payAgain: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PaymentPageDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */

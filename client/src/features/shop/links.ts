@@ -1,2 +1,8 @@
 /** The storefront's own line of links; profile and sign-in stand behind them. */
-export const shopLinks: readonly { to: string; label: string }[] = [];
+export const shopLinks: readonly { to: string; label: string }[] = [
+  { to: '/irons', label: 'Irons' },
+  { to: '/kits', label: 'Kits' },
+  { to: '/spares', label: 'Tips and spares' },
+  { to: '/own-orders', label: 'Your orders' },
+  { to: '/basket', label: 'Basket' },
+];
