@@ -17,6 +17,7 @@ import { ShippingModule } from './shipping/shipping.module.js';
 import { StockModule } from './stock/stock.module.js';
 import { SuppliersModule } from './suppliers/suppliers.module.js';
 import { TestingModule } from './testing/testing.module.js';
+import { UnitPagesModule } from './units/unit-pages.module.js';
 import { UnitsModule } from './units/units.module.js';
 
 /** Everything the server is made of; a new module is added to its row. */
@@ -35,6 +36,7 @@ import { UnitsModule } from './units/units.module.js';
     InvoicingModule,
     // Making
     UnitsModule,
+    UnitPagesModule,
     TestingModule,
     BuildsModule,
     PlanningModule,

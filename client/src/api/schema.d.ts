@@ -101,6 +101,22 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/batches/{number}/labels': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Units_labels'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/batches/{number}/made-pieces': {
     parameters: {
       query?: never;
@@ -1802,6 +1818,55 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/unit-pages/{token}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** Opened by the code on a unit's label; kept out of search engines. */
+    get: operations['Units_publicPage'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/units': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Units_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/units/{serial}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Units_open'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/units/{serial}/completion': {
     parameters: {
       query?: never;
@@ -1846,6 +1911,22 @@ export interface paths {
     put?: never;
     /** A lot scanned to a unit: the record then says exactly that it is in it. */
     post: operations['Batches_fitLot'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/units/{serial}/label': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Units_label'];
+    put?: never;
+    post?: never;
     delete?: never;
     options?: never;
     head?: never;
@@ -2002,6 +2083,19 @@ export interface components {
       notes: string[];
       rowCount: number;
       title: string;
+    };
+    AsBuiltDto: {
+      /** @description Scanned to this unit; otherwise one of the lots picked for its batch. */
+      exact: boolean;
+      fittedAt: string;
+      /** @description Null for a part followed by count. */
+      lot: string | null;
+      measure: string;
+      part: string;
+      partName: string;
+      path: string;
+      quantity: string;
+      supplier: string | null;
     };
     AuditEntryDto: {
       action: string;
@@ -3678,6 +3772,32 @@ export interface components {
       name: string;
       version: number;
     };
+    PublicReadingDto: {
+      answer: boolean | null;
+      lowerLimit: string | null;
+      name: string;
+      reading: string | null;
+      unit: string | null;
+      upperLimit: string | null;
+      within: boolean;
+    };
+    PublicUnitDto: {
+      batchSize: number;
+      builtWeek: number;
+      /** @description ISO year and week in which it was begun. */
+      builtYear: number;
+      cautions: string[];
+      measuredOn: string | null;
+      name: string;
+      readings: components['schemas']['PublicReadingDto'][];
+      revision: number;
+      serial: string;
+      shop: string;
+      /** @description Whether its last measurement passed and nothing was found wrong with it since. */
+      sound: boolean;
+      /** @description Counted from the day it left the shop; null while it has not. */
+      warrantyUntil: string | null;
+    };
     QuotedLineDto: {
       form: string;
       listingId: number;
@@ -4264,11 +4384,70 @@ export interface components {
       /** @description Rounded up once per bill to what can be handed out. */
       quantity: string;
     };
+    UnitDto: {
+      asBuilt: components['schemas']['AsBuiltDto'][];
+      batch: string;
+      /** @description How many were built together. */
+      batchSize: number;
+      /** @description The bin it lies in, while it is on the shelf. */
+      bin: string | null;
+      completedAt: string | null;
+      faults: components['schemas']['FaultDto'][];
+      id: number;
+      issuedAt: string;
+      /** @description The path of its public page. */
+      page: string;
+      part: string;
+      partName: string;
+      place: number;
+      revision: number;
+      rework: components['schemas']['UnitReworkDto'][];
+      runs: components['schemas']['TestRunDto'][];
+      scrappedAt: string | null;
+      scrapReason: string | null;
+      serial: string;
+      sound: boolean;
+      /** @enum {string} */
+      state: 'gone' | 'on_shelf' | 'scrapped' | 'under_way';
+      steps: components['schemas']['UnitStepDto'][];
+    };
+    UnitItemDto: {
+      batch: string;
+      /** @description The bin it lies in, while it is on the shelf. */
+      bin: string | null;
+      completedAt: string | null;
+      id: number;
+      issuedAt: string;
+      part: string;
+      partName: string;
+      revision: number;
+      serial: string;
+      sound: boolean;
+      /** @enum {string} */
+      state: 'gone' | 'on_shelf' | 'scrapped' | 'under_way';
+    };
+    UnitPageDto: {
+      items: components['schemas']['UnitItemDto'][];
+      total: number;
+    };
+    UnitReworkDto: {
+      doneAt: string;
+      doneBy: string | null;
+      minutes: string;
+      what: string;
+    };
     UnitRunsDto: {
       /** @description The run that the next reading is for. */
       nextRun: number;
       runs: components['schemas']['TestRunDto'][];
       serial: string;
+    };
+    UnitStepDto: {
+      caution: string | null;
+      doneAt: string | null;
+      doneBy: string | null;
+      position: number;
+      title: string;
     };
     UseDto: {
       /** @description Whether it is only an alternate of the line. */
@@ -4588,6 +4767,34 @@ export interface operations {
         content: {
           'application/json': components['schemas']['BatchDocumentDto'];
         };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Units_labels: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        number: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {
@@ -8531,6 +8738,104 @@ export interface operations {
       };
     };
   };
+  Units_publicPage: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        token: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PublicUnitDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Units_list: {
+    parameters: {
+      query?: {
+        batch?: string;
+        page?: number;
+        pageSize?: number;
+        part?: string;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+        state?: 'gone' | 'on_shelf' | 'scrapped' | 'under_way';
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['UnitPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Units_open: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        serial: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['UnitDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   Batches_complete: {
     parameters: {
       query?: never;
@@ -8621,6 +8926,34 @@ export interface operations {
     };
     responses: {
       204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Units_label: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        serial: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
         headers: {
           [name: string]: unknown;
         };

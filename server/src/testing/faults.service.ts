@@ -47,6 +47,11 @@ export class FaultsService {
     return faultDto(fault);
   }
 
+  /** In the order in which they were found. */
+  async ofUnit(unitId: number): Promise<FaultDto[]> {
+    return (await this.repository.ofUnit(this.database.handle, unitId)).map(faultDto);
+  }
+
   async firstPasses(): Promise<FirstPassListDto> {
     return { items: await this.repository.firstPasses(this.database.handle) };
   }

@@ -23,4 +23,5 @@ export const publicRoutes: Readonly<Record<string, string>> = {
   'POST /api/payment-events': 'the payments service signs what it sends',
   'GET /api/shop/orders/:number': 'needs the token of the link, or to be signed in as its buyer',
   'POST /api/shop/orders/:number/payment-pages': 'as above',
+  'GET /api/unit-pages/:token': 'needs the code on a unit’s label; names no person',
 };
