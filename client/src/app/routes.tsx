@@ -1,6 +1,7 @@
 import { redirect, type RouteObject } from 'react-router-dom';
 import { accountRoutes, ownAccountRoutes } from '../features/account/routes';
 import { shopRoutes } from '../features/shop/routes';
+import { unitPageRoutes } from '../features/unit-page/routes';
 import { onlyFor, onlyForSignedIn, onlyForStaff } from './access';
 import { areas } from './areas';
 import { NotFound, RootFault, RouteFault } from './faults';
@@ -38,7 +39,7 @@ const fullScreen: RouteObject = {
 
 const shop: RouteObject = {
   lazy: () => import('./shell/shop-shell'),
-  children: [{ ErrorBoundary: RouteFault, children: [...shopRoutes, ...accountRoutes, notFound()] }],
+  children: [{ ErrorBoundary: RouteFault, children: [...shopRoutes, ...unitPageRoutes, ...accountRoutes, notFound()] }],
 };
 
 const own: RouteObject = {

@@ -13,6 +13,9 @@ export const bench: AreaParts = {
     { path: 'batches/:number', lazy: () => import('./pages/batch-page') },
     { path: 'batches/:number/picking', lazy: () => import('./pages/picking-page') },
     { path: 'units', lazy: () => import('./pages/units-page') },
+    { path: 'units/:serial', lazy: () => import('./pages/unit-page') },
     { path: 'faults', lazy: () => import('./pages/faults-page') },
+    { path: 'faults/:number', lazy: () => import('./pages/fault-page') },
   ],
+  fullScreenRoutes: [{ path: 'batches/:number/build', lazy: () => import('./pages/build-page') }],
 };
