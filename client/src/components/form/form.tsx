@@ -10,6 +10,7 @@ import { useFormSending } from './use-form-sending';
 
 const Frame = styled('form')(({ theme }) => ({
   display: 'grid',
+  gridTemplateColumns: 'minmax(0, 1fr)',
   gap: 18,
   maxWidth: 640,
   '& .acts': { display: 'flex', flexWrap: 'wrap', gap: 10, marginTop: 6 },

@@ -5,6 +5,7 @@ import { Quantity } from '../../../components/figures';
 import { Sheet } from '../../../components/sheet';
 import { ErrorState, LoadingState } from '../../../components/states';
 import { Tag } from '../../../components/tag/tag';
+import { VisuallyHidden } from '../../../components/visually-hidden';
 import { treeQuery, type BillTree, type RevisionPlace } from '../api/bills';
 import { DenseTable, type DenseColumn } from './dense-table';
 import { unitOf } from './design-words';
@@ -61,7 +62,7 @@ function Places({ rows }: { rows: readonly Row[] }): ReactElement {
       {shown.map((row) => {
         const key = keyOf(row.path);
         return (
-          <tr key={key} aria-level={row.level}>
+          <tr key={key}>
             <td>
               <span style={{ display: 'inline-flex', alignItems: 'center', paddingLeft: (row.level - 1) * 26 }}>
                 {holders.has(key) ? (
@@ -78,6 +79,7 @@ function Places({ rows }: { rows: readonly Row[] }): ReactElement {
                 ) : (
                   <span aria-hidden="true" style={{ display: 'inline-block', width: 22 }} />
                 )}
+                <VisuallyHidden>level {row.level}, </VisuallyHidden>
                 <Tag kind="part" code={row.part.code} story={row.part.name} />
               </span>
             </td>

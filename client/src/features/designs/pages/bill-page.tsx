@@ -27,9 +27,17 @@ const Layout = styled('div')(({ theme }) => ({
   gridTemplateColumns: 'minmax(0, 1fr) 340px',
   gap: 32,
   alignItems: 'start',
-  '& .main, & .side': { display: 'grid', gap: 32, minWidth: 0 },
+  '& .main, & .side': { display: 'grid', gridTemplateColumns: 'minmax(0, 1fr)', gap: 32, minWidth: 0 },
   '& .side': { gap: 18 },
-  [theme.breakpoints.down('lg')]: { gridTemplateColumns: 'minmax(0, 1fr)' },
+  [theme.breakpoints.down('lg')]: {
+    gridTemplateColumns: 'minmax(0, 1fr)',
+    // How many now and what one costs come before the long tables.
+    '& .side': {
+      order: -1,
+      gridTemplateColumns: 'repeat(auto-fit, minmax(min(280px, 100%), 1fr))',
+      alignItems: 'start',
+    },
+  },
 }));
 
 export function Component(): ReactElement {

@@ -44,7 +44,7 @@ function Changes({ comparison }: { comparison: BillComparison }): ReactElement {
   ].filter(({ rows }) => rows.length > 0);
   if (sections.length === 0) return <EmptyState title="Nothing differs">Both revisions say the same.</EmptyState>;
   return (
-    <div style={{ display: 'grid', gap: 28 }}>
+    <div style={{ display: 'grid', gridTemplateColumns: 'minmax(0, 1fr)', gap: 28 }}>
       {sections.map(({ title, rows }) => (
         <Sheet key={title} title={title} bare>
           <ChangeTable title={title} rows={rows} comparison={comparison} />

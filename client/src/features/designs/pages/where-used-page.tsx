@@ -59,7 +59,7 @@ function Uses({ code }: { code: string }): ReactElement {
     return <EmptyState title={`${part.code} is in no bill and in no kit`}>{part.name} stands by itself.</EmptyState>;
   }
   return (
-    <div style={{ display: 'grid', gap: 28 }}>
+    <div style={{ display: 'grid', gridTemplateColumns: 'minmax(0, 1fr)', gap: 28 }}>
       {uses.length > 0 ? (
         <Sheet title={`${part.name}, upward`} bare aside={<span>{formatCount(uses.length, 'place')}</span>}>
           <UseRows uses={uses} />

@@ -12,7 +12,7 @@ const Frame = styled('section')(({ theme }) => ({
     border: `1px solid ${theme.vars.palette.tone.line}`,
     background: theme.vars.palette.tone.sheet,
   },
-  '& table': { width: '100%', borderCollapse: 'collapse', fontSize: '0.875rem' },
+  '& table': { width: '100%', minWidth: 860, borderCollapse: 'collapse', fontSize: '0.875rem' },
   '& th': {
     ...theme.typography.h3,
     fontSize: '0.8125rem',
