@@ -55,10 +55,16 @@ export class Caller {
     return this.#change('POST', path, body, { 'idempotency-key': key });
   }
 
-  /** A POST with a file, as a form sends it. */
-  async upload(path: string, field: string, file: string, fields: Record<string, string> = {}): Promise<APIResponse> {
+  /** A POST with a file, as a form sends it; with a key it makes something, and the same key again nothing new. */
+  async upload(
+    path: string,
+    field: string,
+    file: string,
+    { fields = {}, key }: { fields?: Record<string, string>; key?: string } = {},
+  ): Promise<APIResponse> {
     const content = { name: basename(file), mimeType: 'application/octet-stream', buffer: await readFile(file) };
-    return this.context.post(path, { headers: this.#headers(), multipart: { ...fields, [field]: content } });
+    const headers = { ...this.#headers(), ...(key === undefined ? {} : { 'idempotency-key': key }) };
+    return this.context.post(path, { headers, multipart: { ...fields, [field]: content } });
   }
 
   dispose(): Promise<void> {

@@ -31,7 +31,10 @@ export const queryClient: QueryClient = new QueryClient({
     onSettled: async (_data, error, _variables, _result, { meta }) => {
       // A refusal has changed nothing. Where nothing answered, the change may have been made all the same.
       if (error instanceof ApiProblem && error.status >= 400 && error.status < 500) return;
-      await Promise.all((meta?.touches ?? []).map((queryKey) => queryClient.invalidateQueries({ queryKey })));
+      const touched = meta?.touches ?? [];
+      // A page opened next would first show what it was before, and send on a version that is no longer there.
+      for (const queryKey of touched) queryClient.removeQueries({ queryKey, type: 'inactive' });
+      await Promise.all(touched.map((queryKey) => queryClient.invalidateQueries({ queryKey })));
     },
   }),
 });
