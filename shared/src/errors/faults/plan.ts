@@ -17,4 +17,8 @@ export const planFaults = {
     'What is there, what comes and what is promised must be quantities for the same periods, none below zero.',
   plan_not_available: '{quantity} cannot be promised for period {period}; {free} are free.',
   plan_load: 'The time of {id} cannot be planned with: {minutes} minutes.',
+  plan_mix_product:
+    '{part} cannot be in a build mix: it needs a bill, whole numbers of at least zero, and a weight above zero, once.',
+  plan_offer: 'The prices of {supplier} cannot be used: none may be below zero, and no quantity may have two.',
+  plan_discount_bands: 'Price bands need quantities of at least zero and prices above zero.',
 } as const;
