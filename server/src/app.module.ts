@@ -14,6 +14,9 @@ import { PlanningModule } from './planning/planning.module.js';
 import { PlatformModule } from './platform/platform.module.js';
 import { SettingsModule } from './settings/settings.module.js';
 import { ShippingModule } from './shipping/shipping.module.js';
+import { ReturnsModule } from './returns/returns.module.js';
+import { BooksModule } from './books/books.module.js';
+import { TodayModule } from './today/today.module.js';
 import { StockModule } from './stock/stock.module.js';
 import { SuppliersModule } from './suppliers/suppliers.module.js';
 import { TestingModule } from './testing/testing.module.js';
@@ -46,7 +49,10 @@ import { UnitsModule } from './units/units.module.js';
     OrdersModule,
     PaymentsModule,
     ShippingModule,
+    ReturnsModule,
     // For the accountant
+    BooksModule,
+    TodayModule,
     FindModule,
   ],
 })

@@ -12,6 +12,10 @@ export interface DocumentRow {
   readonly reverses: number | null;
 }
 
+export type KeptDocumentRow = Pick<DocumentRow, 'kind' | 'number' | 'occurredAt' | 'recordedBy'> & {
+  readonly id: number;
+};
+
 @Injectable()
 export class DocumentsRepository {
   async insert(trx: Transaction<DB>, row: DocumentRow): Promise<number> {
@@ -28,5 +32,14 @@ export class DocumentsRepository {
       .returning('id')
       .executeTakeFirstOrThrow();
     return id;
+  }
+
+  async get(trx: Transaction<DB>, id: number): Promise<KeptDocumentRow> {
+    const row = await trx
+      .selectFrom('document')
+      .select(['id', 'kind', 'number', 'occurred_at as occurredAt', 'recorded_by as recordedBy'])
+      .where('id', '=', id)
+      .executeTakeFirstOrThrow();
+    return { ...row, kind: row.kind as DocumentKind };
   }
 }

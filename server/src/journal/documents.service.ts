@@ -51,6 +51,11 @@ export class DocumentsService {
     return { id, kind, number, occurredAt, recordedBy };
   }
 
+  /** Reads a document that was recorded earlier, to post to it. */
+  async get(trx: Transaction<DB>, id: number): Promise<RecordedDocument> {
+    return this.repository.get(trx, id);
+  }
+
   private async nextNumber(trx: Transaction<DB>, kind: DocumentKind): Promise<string> {
     const letters = documentKinds[kind];
     if (letters === null) throw new Error(`a document of kind ${kind} carries the number of what it belongs to`);

@@ -9,6 +9,11 @@ import { OpenPaymentPageService } from './open-payment-page.service.js';
 import { PaymentEventsService } from './payment-events.service.js';
 import { PaymentFeeTask } from './payment-fee.task.js';
 import { PaymentServiceClient } from './payment-service.client.js';
+import { ClosePaymentPagesService } from './close-payment-pages.service.js';
+import { PaymentReviewsController } from './payment-reviews.controller.js';
+import { PaymentReviewsService } from './payment-reviews.service.js';
+import { RefundsService } from './refunds.service.js';
+import { SendRefundTask } from './send-refund.task.js';
 import { PaymentSessionsRepository } from './payment-sessions.repository.js';
 import { PaymentSweepTask } from './payment-sweep.task.js';
 import { PaymentsController } from './payments.controller.js';
@@ -17,10 +22,14 @@ import { RefundsRepository } from './refunds.repository.js';
 
 @Module({
   imports: [InvoicingModule, JournalModule, OrdersModule],
-  controllers: [CheckoutController, PaymentsController],
+  controllers: [CheckoutController, PaymentsController, PaymentReviewsController],
   providers: [
     ApplyPaymentService,
     CheckoutService,
+    ClosePaymentPagesService,
+    PaymentReviewsService,
+    RefundsService,
+    SendRefundTask,
     OpenPaymentPageService,
     PaymentEventsService,
     PaymentFeeTask,
@@ -30,6 +39,6 @@ import { RefundsRepository } from './refunds.repository.js';
     RefundEventsService,
     RefundsRepository,
   ],
-  exports: [CheckoutService, PaymentServiceClient],
+  exports: [ClosePaymentPagesService, RefundsService, CheckoutService, PaymentServiceClient],
 })
 export class PaymentsModule {}

@@ -258,7 +258,8 @@ describe('Dispatch', () => {
     );
     expect(await violations()).toEqual([]);
     await bench.create('/api/parcels', { order }).expect(409);
-  });
+    // The papers are drawn in it.
+  }, 30_000);
 
   it('leaves no prepayment behind once everything has left', async () => {
     const row = await shop.app.database.handle
