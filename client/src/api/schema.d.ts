@@ -482,6 +482,54 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/book-exports/entries.csv': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Exports_entries'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/book-exports/invoices.csv': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Exports_invoices'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/book-exports/totals': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Exports_totals'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/countries': {
     parameters: {
       query?: never;
@@ -571,6 +619,38 @@ export interface paths {
     };
     /** Drafts that wait for release, and released bills that cannot be built to. */
     get: operations['DesignFigures_designQueue'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/desk-orders': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['OrderDesk_list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/desk-orders/{code}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['OrderDesk_get'];
     put?: never;
     post?: never;
     delete?: never;
@@ -927,6 +1007,22 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/journal-entries': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Books_journal'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/kits': {
     parameters: {
       query?: never;
@@ -1005,6 +1101,23 @@ export interface paths {
     put?: never;
     /** Anybody at the bench may hold a lot back; to let it go again is the owner's. */
     post: operations['Lots_changeStatus'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/order-cancellations': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Cancels an order that has not left: what was paid goes back with a credit note, what was claimed is free. */
+    post: operations['Cancellations_cancel'];
     delete?: never;
     options?: never;
     head?: never;
@@ -1350,6 +1463,102 @@ export interface paths {
     put?: never;
     /** Called by the payments service; its signature over the raw bytes is what lets it in. */
     post: operations['Payments_receive'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/payment-reviews/{id}/settled': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['PaymentReviews_settle'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/payments': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Books_payments'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/periods': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Exports_months'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/periods/{month}/closed': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Exports_close'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/periods/{month}/reopened': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    post: operations['Exports_reopen'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/posting-rules': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Books_postingRules'];
+    put?: never;
+    post?: never;
     delete?: never;
     options?: never;
     head?: never;
@@ -1818,6 +2027,38 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/today': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Today_get'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/trial-balance': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get: operations['Books_trialBalance'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/unit-pages/{token}': {
     parameters: {
       query?: never;
@@ -2051,6 +2292,15 @@ export interface paths {
 export type webhooks = Record<string, never>;
 export interface components {
   schemas: {
+    AccountBalanceDto: {
+      account: string;
+      /** @description Debit less credit. */
+      balance: components['schemas']['MoneyDto'];
+      credit: components['schemas']['MoneyDto'];
+      debit: components['schemas']['MoneyDto'];
+      kind: string;
+      name: string;
+    };
     AdjustmentInputDto: {
       lines: components['schemas']['AdjustmentLineDto'][];
       /** @description What happened, for whoever reads it later. */
@@ -2520,6 +2770,17 @@ export interface components {
       pageToken: string;
       serial: string;
     };
+    CancellationDto: {
+      /** @description The credit note, if the order was paid. */
+      creditNote: string | null;
+      order: string;
+    };
+    CancelOrderInput: {
+      /** @description The order's number. */
+      order: string;
+      /** @description Stands in the credit note and in the buyer's mail. */
+      reason: string;
+    };
     CarrierAnswerInput: {
       /** @description Who was asked at the carrier, when, and what they said. */
       note: string;
@@ -2868,6 +3129,20 @@ export interface components {
       part: string;
       quantity: string;
     };
+    ExportTotalsDto: {
+      credit: components['schemas']['MoneyDto'];
+      creditNotes: number;
+      debit: components['schemas']['MoneyDto'];
+      entries: number;
+      from: string;
+      gross: components['schemas']['MoneyDto'];
+      invoices: number;
+      lines: number;
+      /** @description Invoices less credit notes. */
+      net: components['schemas']['MoneyDto'];
+      to: string;
+      vat: components['schemas']['MoneyDto'];
+    };
     FaultDto: {
       action: string | null;
       batch: string;
@@ -3129,6 +3404,26 @@ export interface components {
        */
       quantity: string;
     };
+    JournalEntryDto: {
+      day: string;
+      document: string;
+      documentKind: string;
+      event: string;
+      id: number;
+      lines: components['schemas']['JournalLineDto'][];
+      narrative: string;
+      total: components['schemas']['MoneyDto'];
+    };
+    JournalLineDto: {
+      account: string;
+      accountName: string;
+      credit: components['schemas']['MoneyDto'] | null;
+      debit: components['schemas']['MoneyDto'] | null;
+    };
+    JournalPageDto: {
+      items: components['schemas']['JournalEntryDto'][];
+      total: number;
+    };
     KitListDto: {
       items: components['schemas']['KitListItemDto'][];
       total: number;
@@ -3288,6 +3583,16 @@ export interface components {
       amount: number;
       currency: string;
     };
+    MonthDto: {
+      closedAt: string | null;
+      closedBy: string | null;
+      entries: number;
+      /** @description `2027-03` */
+      month: string;
+    };
+    MonthsDto: {
+      items: components['schemas']['MonthDto'][];
+    };
     MoveDto: {
       bin: string;
       document: string;
@@ -3333,6 +3638,90 @@ export interface components {
       /** @description The order's number. */
       order: string;
     };
+    OrderDeskDocumentDto: {
+      at: string;
+      kind: string;
+      number: string;
+      /** @description What happened, in a sentence. */
+      sentence: string;
+    };
+    OrderDeskDto: {
+      address: string[];
+      /** @description Whether it may still be cancelled. */
+      cancellable: boolean;
+      country: string;
+      delivery: components['schemas']['MoneyDto'] | null;
+      documents: components['schemas']['OrderDeskDocumentDto'][];
+      email: string;
+      /** @description Null for who works without prices. */
+      gross: components['schemas']['MoneyDto'] | null;
+      /** @description The promised day has passed and the order is still here. */
+      late: boolean;
+      lines: components['schemas']['OrderDeskLineDto'][];
+      net: components['schemas']['MoneyDto'] | null;
+      number: string;
+      /** @description The open parcel. */
+      parcel: string | null;
+      placedAt: string;
+      promisedOn: string;
+      recipient: string;
+      reviews: components['schemas']['OrderDeskReviewDto'][];
+      /** @description Where it is, in a sentence. */
+      sentence: string;
+      state: components['schemas']['OrderState'];
+      vat: components['schemas']['MoneyDto'] | null;
+      vatNote: string | null;
+    };
+    OrderDeskLineDto: {
+      form: string;
+      needs: components['schemas']['OrderDeskNeedDto'][];
+      net: components['schemas']['MoneyDto'] | null;
+      part: string;
+      quantity: number;
+      title: string;
+    };
+    OrderDeskNeedDto: {
+      bag: string | null;
+      /** @description Batches that it waits for. */
+      batches: string[];
+      /** @description Claimed on the shelf. */
+      fromShelf: string;
+      measure: string;
+      part: string;
+      partName: string;
+      quantity: string;
+      /** @description Neither on the shelf nor to come. */
+      short: string;
+    };
+    OrderDeskPageDto: {
+      items: components['schemas']['OrderDeskRowDto'][];
+      total: number;
+    };
+    OrderDeskReviewDto: {
+      createdAt: string;
+      id: number;
+      resolution: string | null;
+      what: string;
+    };
+    OrderDeskRowDto: {
+      country: string;
+      /** @description Null for who works without prices. */
+      gross: components['schemas']['MoneyDto'] | null;
+      /** @description The promised day has passed and the order is still here. */
+      late: boolean;
+      number: string;
+      /** @description The open parcel. */
+      parcel: string | null;
+      placedAt: string;
+      promisedOn: string;
+      recipient: string;
+      /** @description Where it is, in a sentence. */
+      sentence: string;
+      state: components['schemas']['OrderState'];
+    };
+    /** @enum {string} */
+    OrderState:
+      'building' | 'cancelled' | 'packed' | 'packing' | 'paying' | 'ready' | 'review' | 'shipped' | 'short' | 'unpaid';
     OutboxMailDto: {
       attempts: number;
       createdAt: string;
@@ -3742,6 +4131,18 @@ export interface components {
       path: string;
       quantity: string;
     };
+    PostingRuleDto: {
+      component: string;
+      creditAccount: string;
+      creditName: string;
+      debitAccount: string;
+      debitName: string;
+      event: string;
+      sentence: string;
+    };
+    PostingRulesDto: {
+      items: components['schemas']['PostingRuleDto'][];
+    };
     ProblemDto: {
       /** @description What the client decides by. */
       code: components['schemas']['ErrorCode'];
@@ -3851,6 +4252,25 @@ export interface components {
       /** @enum {string} */
       verdict: 'outside' | 'within';
     };
+    ReceivedPaymentDto: {
+      amount: components['schemas']['MoneyDto'];
+      document: string;
+      invoice: string | null;
+      order: string;
+      providerPaymentId: string;
+      receivedAt: string;
+      refunded: components['schemas']['MoneyDto'];
+      refundState: string | null;
+    };
+    ReceivedPaymentsDto: {
+      /** @description What the card processor holds by the books: payments less fees and refunds. */
+      clearing: components['schemas']['MoneyDto'];
+      items: components['schemas']['ReceivedPaymentDto'][];
+      total: number;
+    };
+    ReopenMonthInput: {
+      reason: string;
+    };
     ReversalInputDto: {
       /** @description Why it was wrong. */
       reason: string;
@@ -3948,6 +4368,10 @@ export interface components {
       currency: string;
       name: string;
       timeZone: string;
+    };
+    SettleReviewInput: {
+      /** @description What was found and done. */
+      resolution: string;
     };
     ShelfQueueDto: {
       expiringLotCount: number;
@@ -4344,6 +4768,51 @@ export interface components {
       voidedAt: string | null;
       voidReason: string | null;
     };
+    TodayActionDto: {
+      label: string;
+      /** @description The address of the screen where it is done. */
+      to: string;
+    };
+    TodayBatchDto: {
+      code: string;
+      current: string | null;
+      note: string;
+      units: components['schemas']['TodayUnitDto'][];
+    };
+    TodayDto: {
+      batches: components['schemas']['TodayBatchDto'][];
+      day: string;
+      figures: components['schemas']['TodayFigureDto'][];
+      promises: components['schemas']['TodayPromisesDto'] | null;
+      queue: components['schemas']['TodayItemDto'][];
+    };
+    TodayFigureDto: {
+      count: string | null;
+      label: string;
+      money: components['schemas']['MoneyDto'] | null;
+    };
+    TodayItemDto: {
+      action: components['schemas']['TodayActionDto'] | null;
+      because: string | null;
+      due: string | null;
+      key: string;
+      late: boolean;
+      /** @description Names things in braces. */
+      sentence: string;
+      /** @description Warns without anything being wrong yet. */
+      signal: boolean;
+    };
+    TodayPromisesDto: {
+      safe: number;
+      thisWeek: number;
+    };
+    TodayUnitDto: {
+      serial: string;
+      stepsDone: number;
+      stepsTotal: number;
+      /** @enum {string} */
+      verdict: 'failed' | 'open' | 'passed' | 'rework' | 'scrapped';
+    };
     TransferInputDto: {
       lines: components['schemas']['TransferLineDto'][];
       note?: string | null;
@@ -4383,6 +4852,13 @@ export interface components {
       part: components['schemas']['BillPartDto'];
       /** @description Rounded up once per bill to what can be handed out. */
       quantity: string;
+    };
+    TrialBalanceDto: {
+      accounts: components['schemas']['AccountBalanceDto'][];
+      credit: components['schemas']['MoneyDto'];
+      debit: components['schemas']['MoneyDto'];
+      from: string | null;
+      to: string;
     };
     UnitDto: {
       asBuilt: components['schemas']['AsBuiltDto'][];
@@ -5651,6 +6127,95 @@ export interface operations {
       };
     };
   };
+  Exports_entries: {
+    parameters: {
+      query: {
+        from: string;
+        to: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Exports_invoices: {
+    parameters: {
+      query: {
+        from: string;
+        to: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Exports_totals: {
+    parameters: {
+      query: {
+        from: string;
+        to: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ExportTotalsDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   Shop_countries: {
     parameters: {
       query?: never;
@@ -5884,6 +6449,82 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['DesignQueueDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  OrderDesk_list: {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+        state?:
+          | 'building'
+          | 'cancelled'
+          | 'packed'
+          | 'packing'
+          | 'paying'
+          | 'ready'
+          | 'review'
+          | 'shipped'
+          | 'short'
+          | 'unpaid';
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['OrderDeskPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  OrderDesk_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        code: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['OrderDeskDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */
@@ -6581,6 +7222,47 @@ export interface operations {
       };
     };
   };
+  Books_journal: {
+    parameters: {
+      query?: {
+        /** @description Entries with a line on this account. */
+        account?: string;
+        /** @description Entries of one document, by its number. */
+        document?: string;
+        from?: string;
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+        to?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['JournalPageDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   Contents_list: {
     parameters: {
       query?: {
@@ -6777,6 +7459,41 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['LotDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Cancellations_cancel: {
+    parameters: {
+      query?: never;
+      header: {
+        /** @description Made afresh for each thing to create, and kept when the same request is sent again. */
+        'Idempotency-Key': string;
+      };
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['CancelOrderInput'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['CancellationDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */
@@ -7563,6 +8280,189 @@ export interface operations {
           [name: string]: unknown;
         };
         content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  PaymentReviews_settle: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: number;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SettleReviewInput'];
+      };
+    };
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Books_payments: {
+    parameters: {
+      query?: {
+        page?: number;
+        pageSize?: number;
+        /** @description Words to look for. */
+        q?: string;
+        /** @description A column to sort by; a hyphen in front turns the order round. */
+        sort?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ReceivedPaymentsDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Exports_months: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['MonthsDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Exports_close: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        month: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Exports_reopen: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        month: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ReopenMonthInput'];
+      };
+    };
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Books_postingRules: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PostingRulesDto'];
+        };
       };
       /** @description A refusal, as RFC 9457 describes it. */
       default: {
@@ -8725,6 +9625,67 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['SupplierDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Today_get: {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['TodayDto'];
+        };
+      };
+      /** @description A refusal, as RFC 9457 describes it. */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  Books_trialBalance: {
+    parameters: {
+      query?: {
+        /** @description First day; the beginning when nothing is said. */
+        from?: string;
+        /** @description Last day; today when nothing is said. */
+        to?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['TrialBalanceDto'];
         };
       };
       /** @description A refusal, as RFC 9457 describes it. */

@@ -4,7 +4,7 @@ import { PageQuery } from '../platform/paging/page-query.dto.js';
 import {
   JournalPageDto,
   JournalQuery,
-  PaymentPageDto,
+  ReceivedPaymentsDto,
   PeriodQuery,
   PostingRulesDto,
   TrialBalanceDto,
@@ -33,7 +33,7 @@ export class BooksController {
   }
 
   @Get('payments')
-  async payments(@Query() query: PageQuery): Promise<PaymentPageDto> {
+  async payments(@Query() query: PageQuery): Promise<ReceivedPaymentsDto> {
     return this.books.payments(query);
   }
 }

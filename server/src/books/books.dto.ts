@@ -104,7 +104,7 @@ export class PostingRulesDto {
   items: PostingRuleDto[];
 }
 
-export class PaymentRowDto {
+export class ReceivedPaymentDto {
   document: string;
   receivedAt: string;
   order: string;
@@ -115,8 +115,8 @@ export class PaymentRowDto {
   refundState: string | null;
 }
 
-export class PaymentPageDto {
-  items: PaymentRowDto[];
+export class ReceivedPaymentsDto {
+  items: ReceivedPaymentDto[];
   total: number;
   /** What the card processor holds by the books: payments less fees and refunds. */
   clearing: MoneyDto;

@@ -8,7 +8,7 @@ import { ShopService } from '../settings/shop.service.js';
 import type {
   JournalPageDto,
   JournalQuery,
-  PaymentPageDto,
+  ReceivedPaymentsDto,
   PeriodQuery,
   PostingRulesDto,
   TrialBalanceDto,
@@ -75,7 +75,7 @@ export class BooksService {
     return { items: await this.repository.postingRules(this.database.handle) };
   }
 
-  async payments(query: PageQuery): Promise<PaymentPageDto> {
+  async payments(query: PageQuery): Promise<ReceivedPaymentsDto> {
     const handle = this.database.handle;
     const money = await this.money(handle);
     const { items, total } = await this.repository.payments(handle, query);

@@ -8,7 +8,7 @@ import type { Agent } from '../testing/agent.js';
 import { addListing } from '../testing/sale.js';
 import { TodayModule } from '../today/today.module.js';
 import type { TodayDto } from '../today/today.dto.js';
-import type { ExportTotalsDto, JournalPageDto, PaymentPageDto, TrialBalanceDto } from './books.dto.js';
+import type { ExportTotalsDto, JournalPageDto, ReceivedPaymentsDto, TrialBalanceDto } from './books.dto.js';
 import { BooksModule } from './books.module.js';
 import { csvFile } from './csv.js';
 
@@ -71,7 +71,7 @@ describe('The books', () => {
   });
 
   it('list payments with what the card processor still holds', async () => {
-    const { items, clearing } = await read<PaymentPageDto>('/api/payments');
+    const { items, clearing } = await read<ReceivedPaymentsDto>('/api/payments');
     expect(items).toHaveLength(3);
     const { accounts } = await read<TrialBalanceDto>('/api/trial-balance');
     expect(clearing).toEqual(accounts.find(({ account }) => account === '1250')?.balance);
