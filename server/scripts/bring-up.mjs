@@ -1,6 +1,5 @@
 // The programs that npm start and npm run dev both run. Node alone.
 import { spawn } from 'node:child_process';
-import { existsSync } from 'node:fs';
 import { join } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { fakesEnvironment } from './local-settings.mjs';
@@ -62,7 +61,6 @@ export async function startServer({ env, guard, options = [] }) {
 }
 
 export async function loadDemo(serverUrl, { env, guard }) {
-  if (!existsSync(demoLoader)) return remark('this version has no demo yet');
   remark('loading the demo: six months of a small shop');
   await runNode([demoLoader], { guard, env: { ...env, DATABASE_URL: serverUrl } });
 }
@@ -75,7 +73,6 @@ export async function waysIn({ database, baseUrl, setUpCode }) {
   if (await database.isEmpty()) {
     return [`  An empty shop. Its owner signs up at ${baseUrl}/first-owner with the code ${setUpCode}`];
   }
-  if (!existsSync(demoPeople)) return [];
   const { demoSignIns } = await import(pathToFileURL(demoPeople).href);
   if (!(await database.hasPerson(demoSignIns[0].email))) return [];
   const lines = demoSignIns.map(

@@ -34,8 +34,9 @@ const metres = (
   weight: string,
   supplier: string,
   bin: string,
+  pack = 100,
 ): DemoBoughtPart =>
-  piece(code, name, price, weight, supplier, bin, { measure: 'm', traced: 'delivery', pack: 100, reorder: '30' });
+  piece(code, name, price, weight, supplier, bin, { measure: 'm', traced: 'delivery', pack, reorder: '30' });
 
 const print = (code: string, name: string, price: string, weight: string): DemoBoughtPart =>
   piece(code, name, price, weight, 'JUNIPRINT', 'F2', { pack: 250, reorder: '60' });
@@ -74,7 +75,7 @@ export const mechanicalParts: readonly DemoBoughtPart[] = [
   metres('WIRE-SIL-RED', 'Silicone wire, 2.5 mm², red', '1.2400', '31', 'BRACKWIRE', 'C2'),
   metres('WIRE-SIL-BLACK', 'Silicone wire, 2.5 mm², black', '1.2400', '31', 'BRACKWIRE', 'C2'),
   metres('WIRE-SIGNAL', 'Signal wire, 0.14 mm²', '0.0900', '2.6', 'BRACKWIRE', 'C2'),
-  metres('WIRE-ENAMEL-05', 'Enamelled copper wire, 0.5 mm', '0.0420', '1.76', 'BRACKWIRE', 'C2'),
+  metres('WIRE-ENAMEL-05', 'Enamelled copper wire, 0.5 mm', '0.0420', '1.76', 'BRACKWIRE', 'C2', 500),
   metres('WIRE-BARE-15', 'Copper wire, bare, 1.5 mm', '0.1714', '15.8', 'BRACKWIRE', 'C2'),
   metres('WIRE-BARE-20', 'Copper wire, bare, 2.0 mm', '0.3020', '28.1', 'BRACKWIRE', 'C2'),
   piece('TURN-W', 'Secondary turn, formed copper, Wren', '2.2800', '31', 'SLATECOPPER', 'C2', { traced: 'delivery' }),

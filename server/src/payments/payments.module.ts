@@ -6,6 +6,7 @@ import { ApplyPaymentService } from './apply-payment.service.js';
 import { CheckoutController } from './checkout.controller.js';
 import { CheckoutService } from './checkout.service.js';
 import { OpenPaymentPageService } from './open-payment-page.service.js';
+import { PastPaymentsService } from './past-payments.service.js';
 import { PaymentEventsService } from './payment-events.service.js';
 import { PaymentFeeTask } from './payment-fee.task.js';
 import { PaymentServiceClient } from './payment-service.client.js';
@@ -31,6 +32,7 @@ import { RefundsRepository } from './refunds.repository.js';
     RefundsService,
     SendRefundTask,
     OpenPaymentPageService,
+    PastPaymentsService,
     PaymentEventsService,
     PaymentFeeTask,
     PaymentServiceClient,
