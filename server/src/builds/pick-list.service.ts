@@ -3,6 +3,7 @@ import { Decimal, decimal, decimalText } from '@emberlot/shared/measure/decimal'
 import { Clock } from '../platform/clock/clock.js';
 import { Database } from '../platform/database/database.js';
 import { notFound } from '../platform/errors/app-error.js';
+import { ReservationsService, type Availability } from '../stock/reservations.service.js';
 import { BatchIssuesRepository, type UsableLotRow } from './batch-issues.repository.js';
 import { BatchLinesRepository, type BatchLineRow, type LinePart } from './batch-lines.repository.js';
 import { BatchesRepository } from './batches.repository.js';
@@ -15,6 +16,7 @@ export class PickListService {
   constructor(
     private readonly database: Database,
     private readonly clock: Clock,
+    private readonly reservations: ReservationsService,
     private readonly batches: BatchesRepository,
     private readonly lines: BatchLinesRepository,
     private readonly issues: BatchIssuesRepository,
@@ -33,7 +35,8 @@ export class PickListService {
     );
     const partIds = [...open.map(({ partId }) => partId), ...alternates.map(({ id }) => id)];
     const usable = await this.issues.usable(handle, [...new Set(partIds)], this.clock.today());
-    const { rows, shortages } = suggest(open, alternates, usable);
+    const available = await this.reservations.available(handle, partIds);
+    const { rows, shortages } = suggest(open, alternates, usable, available);
     const picked = await this.issues.inBatch(handle, batch.id);
     return {
       number,
@@ -54,24 +57,34 @@ function isOpen(line: BatchLineRow): boolean {
   return decimal(line.issued).lessThan(line.required);
 }
 
-/** Lots for each line in turn: what one line takes is gone for the next. Alternates fill what the own part cannot. */
+/**
+ * Lots for each line in turn: what one line takes is gone for the next. A line takes its own claim and what nobody has
+ * claimed; alternates fill what the own part cannot.
+ */
 function suggest(
   lines: readonly BatchLineRow[],
   alternates: readonly (LinePart & { lineId: number })[],
   usable: readonly UsableLotRow[],
+  available: ReadonlyMap<number, Availability>,
 ): { readonly rows: PickRowDto[]; readonly shortages: PickShortageDto[] } {
   const left = new Map(usable.map((lot) => [lot, decimal(lot.quantity)]));
+  const free = new Map([...available].map(([id, entry]) => [id, Decimal.max(entry.free, 0)]));
   const rows: PickRowDto[] = [];
   const shortages: PickShortageDto[] = [];
   for (const line of lines) {
     let needed = decimal(line.required).minus(line.issued);
     const own = { id: line.partId, code: line.code, name: line.name, measure: line.measure, traced: line.traced };
     for (const part of [own, ...alternates.filter(({ lineId }) => lineId === line.billLineId)]) {
+      let claim = part.id === line.partId ? decimal(line.claimed) : new Decimal(0);
       for (const lot of usable.filter(({ partId }) => partId === part.id)) {
-        const quantity = Decimal.min(needed, left.get(lot) ?? 0);
+        const unclaimed = free.get(part.id) ?? new Decimal(0);
+        const quantity = Decimal.min(needed, left.get(lot) ?? 0, claim.plus(unclaimed));
         if (quantity.lessThanOrEqualTo(0)) continue;
         left.set(lot, (left.get(lot) ?? new Decimal(0)).minus(quantity));
         needed = needed.minus(quantity);
+        const beyond = Decimal.max(quantity.minus(claim), 0);
+        claim = Decimal.max(claim.minus(quantity), 0);
+        free.set(part.id, unclaimed.minus(beyond));
         rows.push({
           path: line.path,
           part: partOf(part),

@@ -8,11 +8,7 @@ import { DenseTable } from './dense-table';
 function standing(line: BatchLine, open: boolean): ReactElement | null {
   if (!open) return null;
   if (line.missing !== '0') {
-    return (
-      <Flag tone="hot">
-        {line.missing} {line.part.measure} missing
-      </Flag>
-    );
+    return <Flag tone="hot">{line.missing} missing</Flag>;
   }
   if (Number(line.issued) >= Number(line.required)) return <Flag tone="sound">picked</Flag>;
   return <Flag tone="cool">claimed</Flag>;

@@ -4,7 +4,6 @@ import { Form } from '../../../components/form/form';
 import { QuantityInput } from '../../../components/form/number-fields';
 import { TextInput } from '../../../components/form/text-fields';
 import { useDraftForm } from '../../../components/form/use-draft-form';
-import { notify } from '../../../lib/notify';
 import { useRework, type Fault } from '../api/bench';
 
 interface Work {
@@ -22,7 +21,6 @@ export function ReworkForm({ fault }: { fault: Fault }): ReactElement {
   });
   const send = async ({ cause, action, minutes }: Work): Promise<void> => {
     await rework.mutateAsync({ cause, action, minutes: minutes || '0', version: fault.version });
-    notify(`${fault.number} is closed. Measure ${fault.serial} again.`);
   };
   return (
     <Form form={form} onSubmit={send} submitLabel="Rework is done" label={`Rework for ${fault.number}`}>

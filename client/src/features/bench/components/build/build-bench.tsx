@@ -10,6 +10,7 @@ import {
   frontOf,
   readingFault,
   readingsInHand,
+  readingsToShow,
   suggestionFor,
   verdictOf,
   type Front,
@@ -45,6 +46,7 @@ export function BuildBench({ batch, serial, runs, readings, onUnit }: BuildBench
   const [reporting, setReporting] = useState(false);
   const shown = readingsInHand(batch.testPlan, runs, readings.of(serial));
   const next = frontOf(batch, serial, shown);
+  const all = readingsToShow(runs, shown, next.kind !== 'reading' && next.kind !== 'step');
   const settled = next.kind === 'fault' || next.kind === 'finished' || next.kind === 'scrapped';
   const front: Front = settled ? next : (chosen ?? next);
   const step = front.kind === 'step' ? batch.steps.find(({ position }) => position === front.position) : undefined;
@@ -181,7 +183,7 @@ export function BuildBench({ batch, serial, runs, readings, onUnit }: BuildBench
           ) : null}
         </section>
         <aside className="aside" aria-label="All of this unit">
-          <SideList batch={batch} serial={serial} shown={shown} front={front} onChoose={begin} />
+          <SideList batch={batch} serial={serial} shown={all} front={front} onChoose={begin} />
           <Sent state={readings.state} queue={readings.queue} />
         </aside>
       </div>

@@ -83,6 +83,24 @@ export function readingsInHand(
   return shown;
 }
 
+/** Once a run is judged and no other has begun, its readings are what the unit has. */
+export function readingsToShow(
+  runs: UnitRuns,
+  shown: ReadonlyMap<number, ShownReading>,
+  judged: boolean,
+): ReadonlyMap<number, ShownReading> {
+  const last = runs.runs.findLast(({ verdict }) => verdict !== null);
+  if (!judged || !last || shown.size > 0) return shown;
+  return new Map(
+    last.readings
+      .filter(({ replaced }) => !replaced)
+      .map(({ position, reading, answer, verdict, measuredAt }) => [
+        position,
+        { text: reading ?? (answer ? 'yes' : 'no'), verdict, measuredAt },
+      ]),
+  );
+}
+
 /** Steps first, then readings, then what came of them. */
 export function frontOf(batch: Batch, serial: string, shown: ReadonlyMap<number, ShownReading>): Front {
   const unit = batch.units.find((candidate) => candidate.serial === serial);

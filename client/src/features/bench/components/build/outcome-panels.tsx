@@ -5,7 +5,6 @@ import { useState, type FormEvent, type ReactElement } from 'react';
 import { useIdempotencyKey } from '../../../../api/idempotency';
 import { ErrorState, LoadingState } from '../../../../components/states';
 import { Tag } from '../../../../components/tag/tag';
-import { notify } from '../../../../lib/notify';
 import { sentenceOf } from '../../../../lib/problem';
 import { readStored, writeStored } from '../../../../lib/stored';
 import { unitQuery, useFinishUnit } from '../../api/bench';
@@ -33,7 +32,6 @@ export function FinishPanel({ serial }: { serial: string }): ReactElement {
       await finish.mutateAsync({ body, key: keyFor(body) });
       done();
       writeStored('local', binKey, bin.trim());
-      notify(`${serial} lies in ${bin.trim().toUpperCase()}.`);
     } catch (error) {
       setFault(sentenceOf(error).sentence);
     }
