@@ -13,14 +13,7 @@ const styles = createCache({ key: 'em', nonce: styleNonce(), prepend: true });
 export function Providers({ children }: { children: ReactNode }): ReactElement {
   return (
     <CacheProvider value={styles}>
-      <ThemeProvider
-        theme={theme}
-        defaultMode="system"
-        modeStorageKey="scheme"
-        colorSchemeStorageKey="scheme-of"
-        noSsr
-        disableTransitionOnChange
-      >
+      <ThemeProvider theme={theme} defaultMode="system" modeStorageKey="scheme" colorSchemeStorageKey="scheme-of" noSsr>
         <CssBaseline enableColorScheme />
         <QueryClientProvider client={queryClient}>{children}</QueryClientProvider>
       </ThemeProvider>

@@ -3,6 +3,8 @@ import type { ReactElement, ReactNode } from 'react';
 import { VisuallyHidden } from './visually-hidden';
 
 const Frame = styled('section')(({ theme }) => ({
+  // Holds what is read out only: else it would widen the page by where it would stand unscrolled.
+  position: 'relative',
   overflowX: 'auto',
   border: `1px solid ${theme.vars.palette.tone.line}`,
   background: theme.vars.palette.tone.sheet,
@@ -23,6 +25,7 @@ const Frame = styled('section')(({ theme }) => ({
   '& tbody tr:last-of-type > *': { borderBottom: 0 },
   '& .right': { textAlign: 'right', whiteSpace: 'nowrap' },
   '& .line': { whiteSpace: 'nowrap' },
+  '& .free': { minWidth: 180 },
   '& tfoot th, & tfoot td': {
     borderTop: `1px solid ${theme.vars.palette.tone.edge}`,
     borderBottom: 0,
@@ -42,9 +45,9 @@ export interface TableColumn<Row> {
   quiet?: boolean;
 }
 
-function classOf({ right, oneLine }: Pick<TableColumn<never>, 'right' | 'oneLine'>): string | undefined {
+function classOf({ right, oneLine }: Pick<TableColumn<never>, 'right' | 'oneLine'>): string {
   if (right) return 'right';
-  return oneLine ? 'line' : undefined;
+  return oneLine ? 'line' : 'free';
 }
 
 interface RuledTableProps<Row> {

@@ -50,7 +50,9 @@ export const theme = createTheme({
   typography,
   shape: { borderRadius: 3 },
   shadows: noShadows,
-  motion: { reducedMotion: 'system' },
+  // Nothing moves for decoration: not for those who ask for it, and not for anybody else.
+  motion: { reducedMotion: 'always' },
+  transitions: { create: () => 'none' },
   breakpoints: { values: { xs: 0, sm: 600, md: 900, lg: 1180, xl: 1440 } },
   components: { ...surfaces, ...controls, ...gridLook },
 });
