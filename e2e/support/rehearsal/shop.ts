@@ -1,6 +1,8 @@
 import { type Page, expect } from '@playwright/test';
 import { createDatabase } from '@emberlot/db/database';
 import { demoListings } from '@emberlot/db/demo/offers';
+import type { components } from '../../../client/src/api/schema.js';
+import { Caller, bodyOf } from '../caller.js';
 import type { Product } from '../product.js';
 
 /** The shop of the story: Irish, euros, open every day, so that no promise depends on the day the test runs. */
@@ -74,4 +76,26 @@ export async function payWith(page: Page, cardNumber: string): Promise<void> {
   await page.getByLabel('Security code').fill('123');
   await page.getByLabel('Name on the card').fill('Robin Buyer');
   await page.getByRole('button', { name: /^Pay / }).click();
+}
+
+/** A guest orders so many and goes no further: they are kept for a while. */
+export async function orderUnpaid(product: Product, slug: string, quantity: number): Promise<void> {
+  type Dto<Name extends keyof components['schemas']> = components['schemas'][Name];
+  const guest = await Caller.open(product.url);
+  const { id } = (await bodyOf(await guest.get(`/api/shop/listings/${slug}`))) as Dto<'ShopProductDto'>;
+  const basket = { country: 'IE', postcode: 'D02 X285', lines: [{ listingId: id, quantity }] };
+  const quote = (await bodyOf(await guest.post('/api/shop/quotes', basket))) as Dto<'QuoteDto'>;
+  await bodyOf(
+    await guest.create('/api/shop/orders', {
+      ...basket,
+      email: 'careful@buyer.example',
+      recipient: 'A careful buyer',
+      addressLine: '2 Quay Street',
+      city: 'Dublin',
+      expectedGross: quote.gross?.amount,
+      expectedDay: quote.promise?.leavesBy,
+      termsAccepted: true,
+    }),
+  );
+  await guest.dispose();
 }
