@@ -1,3 +1,4 @@
+import { longDay } from './long-day.js';
 import type { OrderFacts } from './buyer-orders.repository.js';
 
 /** Where an order stands, for its buyer; `now` decides whether a payment page can still be open. */
@@ -11,7 +12,7 @@ export function standingOf(order: OrderFacts, promisedOn: string, now: Date): st
     return `It has left the shop.${way}`;
   }
   if (order.packedAt) return 'Packed. The carrier collects it next.';
-  if (order.paidAt) return `Paid. It leaves the shop by ${promisedOn}.`;
+  if (order.paidAt) return `Paid. It leaves the shop by ${longDay(promisedOn)}.`;
   if (order.waitingForBank) return 'Your bank is working on the payment. The goods are kept for you meanwhile.';
   if (order.pageOpenUntil && order.pageOpenUntil > now)
     return 'Not paid yet. The goods are kept for you for a short while.';

@@ -3,7 +3,8 @@ import { useQuery } from '@tanstack/react-query';
 import type { ReactElement } from 'react';
 import { Link, NavLink, Outlet } from 'react-router-dom';
 import { sessionQuery } from '../../api/session';
-import { shopLinks } from '../../features/shop/links';
+import { useBasket } from '../../features/shop/basket';
+import { plainLinks, shopLinks } from '../../features/shop/links';
 import { isStaff } from '../areas';
 import { Notices } from './notices';
 import { SkipLink } from './skip-link';
@@ -37,10 +38,26 @@ const Content = styled('main')(({ theme }) => ({
   [theme.breakpoints.down('sm')]: { padding: '12px 16px 40px' },
 }));
 
+const Foot = styled('footer')(({ theme }) => ({
+  display: 'flex',
+  flexWrap: 'wrap',
+  gap: '6px 28px',
+  padding: '18px 56px 32px',
+  maxWidth: 1440,
+  margin: '0 auto',
+  borderTop: `1px solid ${theme.vars.palette.tone.line}`,
+  color: theme.vars.palette.tone.inkSoft,
+  '& nav': { display: 'flex', flexWrap: 'wrap', gap: '6px 28px' },
+  '& a': { color: theme.vars.palette.tone.ink },
+  [theme.breakpoints.down('md')]: { padding: '18px 24px 28px' },
+  [theme.breakpoints.down('sm')]: { padding: '18px 16px 24px' },
+}));
+
 /** The storefront's own light frame: no grid, no menus, nothing a visitor would have to wait for. */
 export function Component(): ReactElement {
   const session = useQuery(sessionQuery).data;
   const person = session?.person;
+  const { count } = useBasket();
   return (
     <>
       <SkipLink />
@@ -51,7 +68,7 @@ export function Component(): ReactElement {
         <nav aria-label="Shop">
           {shopLinks.map(({ to, label }) => (
             <NavLink key={to} to={to}>
-              {label}
+              {to === '/basket' && count > 0 ? `${label} (${count})` : label}
             </NavLink>
           ))}
           {person && isStaff(person.role) ? <NavLink to="/today">Workshop</NavLink> : null}
@@ -61,6 +78,15 @@ export function Component(): ReactElement {
       <Content id="content" tabIndex={-1}>
         <Outlet />
       </Content>
+      <Foot>
+        <nav aria-label="About the shop">
+          {plainLinks.map(({ to, label }) => (
+            <Link key={to} to={to}>
+              {label}
+            </Link>
+          ))}
+        </nav>
+      </Foot>
       <Notices />
     </>
   );

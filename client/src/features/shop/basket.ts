@@ -9,7 +9,8 @@ interface Basket {
 }
 
 const key = 'basket';
-const most = 20;
+/** How many of one thing can be ordered at once. */
+export const mostOfOne = 20;
 const listeners = new Set<() => void>();
 let current: Basket | undefined;
 
@@ -78,7 +79,7 @@ function setQuantity(
   lines: readonly BasketLine[],
   country: string | undefined,
 ): void {
-  const kept = Math.min(Math.max(quantity, 0), most);
+  const kept = Math.min(Math.max(quantity, 0), mostOfOne);
   const next = lines.map((line) => (line.listingId === listingId ? { listingId, quantity: kept } : line));
   write({ country, lines: next.filter((line) => line.quantity > 0) });
 }

@@ -6,3 +6,10 @@ export const shopLinks: readonly { to: string; label: string }[] = [
   { to: '/own-orders', label: 'Your orders' },
   { to: '/basket', label: 'Basket' },
 ];
+
+/** What a buyer must be able to read before ordering, from every page. */
+export const plainLinks: readonly { to: string; label: string }[] = [
+  { to: '/terms', label: 'Terms' },
+  { to: '/withdrawal', label: 'Withdrawal' },
+  { to: '/privacy', label: 'Privacy' },
+];

@@ -39,7 +39,7 @@ export const quoteQuery = (country: string, postcode: string, lines: readonly Ba
     queryKey: ['shop', 'quote', country, postcode, lines] as const,
     queryFn: () =>
       answer(api.POST('/api/shop/quotes', { body: { country, lines: [...lines], ...(postcode ? { postcode } : {}) } })),
-    enabled: lines.length > 0,
+    enabled: lines.length > 0 && country !== '',
   });
 
 export function usePlaceOrder(): UseMutationResult<CheckedOut, Error, { body: Checkout; key: string }> {

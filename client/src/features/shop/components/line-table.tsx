@@ -10,6 +10,8 @@ export const LineTable = styled('table')(({ theme }) => ({
   '& th': { textAlign: 'left', color: theme.vars.palette.tone.inkSoft, fontFamily: theme.typography.h1.fontFamily },
   '& th, & td': { padding: '8px 12px', borderBottom: `1px solid ${theme.vars.palette.tone.line}` },
   '& .figure': { textAlign: 'right', whiteSpace: 'nowrap' },
+  [theme.breakpoints.down('sm')]: { '& th, & td': { padding: '8px' }, '& .wide': { display: 'none' } },
+  '& .quantity': { display: 'inline-flex', flexWrap: 'wrap', gap: 8 },
   '& input': {
     font: 'inherit',
     width: 64,

@@ -6,10 +6,10 @@ import type { MoneyAmount } from '../../../lib/format-money';
 const Sums = styled('dl')(({ theme }) => ({
   display: 'grid',
   gridTemplateColumns: '1fr auto',
-  gap: '6px 24px',
+  gap: '6px 0',
   margin: '14px 0',
   maxWidth: 460,
-  '& dd': { margin: 0, textAlign: 'right' },
+  '& dd': { margin: 0, paddingLeft: 24, textAlign: 'right' },
   '& .last': { fontWeight: 600, borderTop: `1px solid ${theme.vars.palette.tone.edge}`, paddingTop: 6 },
 }));
 

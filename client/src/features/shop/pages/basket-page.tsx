@@ -1,4 +1,4 @@
-import { useQuery } from '@tanstack/react-query';
+import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import type { ReactElement } from 'react';
 import { Link } from 'react-router-dom';
 import { Money } from '../../../components/figures';
@@ -6,15 +6,20 @@ import { PageHeading } from '../../../components/page-heading';
 import { Press } from '../../../components/press';
 import { EmptyState, ErrorState, LoadingState } from '../../../components/states';
 import { frontQuery, quoteQuery, type Quote } from '../api/shop';
-import { setBasketQuantity, useBasket } from '../basket';
+import { useBasket } from '../basket';
 import { LineTable } from '../components/line-table';
 import { CountryChoice, PromiseLine } from '../components/price-line';
+import { QuantityField } from '../components/quantity-field';
 import { Totals, vatWords } from '../components/totals';
 
 export function Component(): ReactElement {
   const { lines, country } = useBasket();
   const front = useQuery(frontQuery);
-  const quote = useQuery(quoteQuery(country ?? front.data?.country ?? '', '', lines));
+  const quote = useQuery({
+    ...quoteQuery(country ?? front.data?.country ?? '', '', lines),
+    // The table stays while it is priced anew: whoever types in it keeps their place.
+    placeholderData: keepPreviousData,
+  });
   if (lines.length === 0) {
     return (
       <>
@@ -42,7 +47,7 @@ function QuotedBasket({ quote }: { quote: Quote }): ReactElement {
         <thead>
           <tr>
             <th>What</th>
-            <th className="figure">Each, with VAT</th>
+            <th className="figure wide">Each, with VAT</th>
             <th>How many</th>
             <th className="figure">Without VAT</th>
           </tr>
@@ -53,20 +58,11 @@ function QuotedBasket({ quote }: { quote: Quote }): ReactElement {
               <td>
                 <Link to={`/products/${line.slug}`}>{line.title}</Link>
               </td>
-              <td className="figure">
+              <td className="figure wide">
                 <Money value={line.unitGross} />
               </td>
               <td>
-                <input
-                  type="number"
-                  min={0}
-                  max={20}
-                  aria-label={`How many of ${line.title}`}
-                  value={line.quantity}
-                  onChange={({ target }) => {
-                    setBasketQuantity(line.listingId, Number(target.value));
-                  }}
-                />
+                <QuantityField listingId={line.listingId} title={line.title} quantity={line.quantity} />
               </td>
               <td className="figure">
                 <Money value={line.net} />
@@ -77,9 +73,11 @@ function QuotedBasket({ quote }: { quote: Quote }): ReactElement {
       </LineTable>
       {quote.ask ? <output>{quote.ask}</output> : null}
       <QuoteFoot quote={quote} />
-      <Press to="/checkout" main large disabled={quote.ask !== null}>
-        Go to the address
-      </Press>
+      {quote.ask === null ? (
+        <Press to="/checkout" main large>
+          Go to the address
+        </Press>
+      ) : null}
     </>
   );
 }

@@ -1,5 +1,5 @@
 import { textLimit } from '@emberlot/shared/limits/text';
-import { useQuery } from '@tanstack/react-query';
+import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import type { ReactElement } from 'react';
 import { useWatch } from 'react-hook-form';
 import { Link, useNavigate } from 'react-router-dom';
@@ -55,9 +55,13 @@ function Checkout(): ReactElement {
   });
   const postcode = useWatch({ control: form.control, name: 'postcode' });
   const destination = country ?? front?.country ?? '';
-  const quote = useQuery(quoteQuery(destination, postcode.trim(), lines)).data;
+  const { data: quote, isPlaceholderData: priceIsOld } = useQuery({
+    ...quoteQuery(destination, postcode.trim(), lines),
+    placeholderData: keepPreviousData,
+  });
 
   const send = async (values: typeof nothing): Promise<void> => {
+    if (priceIsOld) throw new Error('The price for this address is being worked out. Look at it, then order.');
     if (!quote?.gross || !quote.promise?.leavesBy) throw new Error(quote?.ask ?? 'The price is not there yet.');
     const { company, addressLine2, ...address } = values;
     const body = {
@@ -79,7 +83,7 @@ function Checkout(): ReactElement {
 
   return (
     <>
-      <PageHeading title="Order" lead="Where should it go?" actions={<CountryChoice />} />
+      <PageHeading title="Order" lead="Your address, and what it comes to." actions={<CountryChoice />} />
       <Form form={form} onSubmit={send} submitLabel="Order with obligation to pay" label="Order">
         <TextInput
           name="email"
@@ -90,7 +94,7 @@ function Checkout(): ReactElement {
           required
         />
         <TextInput name="recipient" label="Name" autoComplete="name" longest={textLimit.name} required />
-        <TextInput name="company" label="Company (if any)" autoComplete="organization" longest={textLimit.name} />
+        <TextInput name="company" label="Company" autoComplete="organization" longest={textLimit.name} />
         <TextInput
           name="addressLine"
           label="Street and number"
@@ -100,7 +104,7 @@ function Checkout(): ReactElement {
         />
         <TextInput
           name="addressLine2"
-          label="More of the address (if any)"
+          label="More of the address"
           autoComplete="address-line2"
           longest={textLimit.line}
         />
@@ -134,9 +138,11 @@ function Summary({ quote }: { quote: Quote | undefined }): ReactElement | null {
       </ul>
       {quote.ask ? <output>{quote.ask}</output> : null}
       <QuoteFoot quote={quote} />
-      <Caution>
-        Hot within seconds. Lithium cells inside: charge only with the lead supplied, keep the pack closed.
-      </Caution>
+      {quote.lines.some(({ form }) => form !== 'spare') ? (
+        <Caution>
+          Hot within seconds. Lithium cells inside: charge only with the lead supplied, keep the pack closed.
+        </Caution>
+      ) : null}
     </section>
   );
 }

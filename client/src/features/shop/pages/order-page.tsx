@@ -23,7 +23,12 @@ export function Component(): ReactElement {
   const order = useQuery(orderQuery(number));
   if (order.isPending) return <LoadingState />;
   if (order.isError) {
-    return <ErrorState error={order.error} onRetry={() => void order.refetch()} what="This order" />;
+    return (
+      <>
+        <PageHeading title={`Order ${number}`} />
+        <ErrorState error={order.error} onRetry={() => void order.refetch()} what="This order" />
+      </>
+    );
   }
   return <OrderView order={order.data} />;
 }
@@ -33,9 +38,11 @@ function OrderView({ order }: { order: BuyerOrder }): ReactElement {
     <Page>
       <PageHeading title={`Order ${order.number}`} tags={<Tag kind="order" code={order.number} />} />
       <output className="standing">{order.standing}</output>
-      <p>
-        It is promised to leave the shop by <strong>{formatPromise(order.promisedOn)}</strong>.
-      </p>
+      {order.canPay ? (
+        <p>
+          It is promised to leave the shop by <strong>{formatPromise(order.promisedOn)}</strong>.
+        </p>
+      ) : null}
       {order.canPay ? <PayAgain number={order.number} /> : null}
       <h2>What you ordered</h2>
       <LineTable>
@@ -80,7 +87,7 @@ function OrderView({ order }: { order: BuyerOrder }): ReactElement {
       <ul>
         {order.events.map(({ at, what }) => (
           <li key={`${at} ${what}`}>
-            {what} <When instant={at} />
+            <When instant={at} />: {what}
           </li>
         ))}
       </ul>

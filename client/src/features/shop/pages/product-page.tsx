@@ -59,23 +59,32 @@ export function Component(): ReactElement {
   const product = useQuery(productQuery(slug, country));
   if (product.isPending) return <LoadingState />;
   if (product.isError) {
-    return <ErrorState error={product.error} onRetry={() => void product.refetch()} what="This product" />;
+    return (
+      <>
+        <PageHeading title="Product" />
+        <ErrorState error={product.error} onRetry={() => void product.refetch()} what="This product" />
+      </>
+    );
   }
   return <ProductView product={product.data} />;
 }
 
 function ProductView({ product }: { product: Product }): ReactElement {
   const navigate = useNavigate();
+  const cautions = [...product.cautions, ...(product.form === 'spare' ? [] : usualCautions)];
+  const shown = product.drawing !== null || product.positions.length > 0 || product.contents.length > 0;
   const orderable = product.price !== null && product.promise.leavesBy !== null;
   return (
     <Layout>
-      <section aria-label="What it is made of">
-        {product.drawing ? (
-          <ExplodedDrawing label={`${product.title}, exploded view`} cells={cellsOfDrawing(product.drawing)} />
-        ) : null}
-        {product.positions.length > 0 ? <Positions product={product} /> : null}
-        {product.contents.length > 0 ? <Contents product={product} /> : null}
-      </section>
+      {shown ? (
+        <section aria-label="What it is made of">
+          {product.drawing ? (
+            <ExplodedDrawing label={`${product.title}, exploded view`} cells={cellsOfDrawing(product.drawing)} />
+          ) : null}
+          {product.positions.length > 0 ? <Positions product={product} /> : null}
+          {product.contents.length > 0 ? <Contents product={product} /> : null}
+        </section>
+      ) : null}
       <section aria-label="Order it">
         <PageHeading title={product.title} />
         <p className="large">{product.summary}</p>
@@ -96,8 +105,8 @@ function ProductView({ product }: { product: Product }): ReactElement {
         >
           Put in basket
         </Press>
-        <h2>Before you use it</h2>
-        {[...product.cautions, ...(product.form === 'spare' ? [] : usualCautions)].map((caution) => (
+        {cautions.length > 0 ? <h2>Before you use it</h2> : null}
+        {cautions.map((caution) => (
           <div key={caution} style={{ marginBottom: 10 }}>
             <Caution>{caution}</Caution>
           </div>
