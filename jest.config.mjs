@@ -40,6 +40,8 @@ const node = (name, extra = {}) => ({
 });
 
 export default {
+  // What is tested is whether it comes out right, not how busy the machine is.
+  testTimeout: 60_000,
   projects: [
     node('shared'),
     node('db', withDatabase),
