@@ -3,6 +3,9 @@ import { screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { queryClient } from '../../app/query-client';
 import { routes } from '../../app/routes';
+// Loaded beforehand: the test runner can fail to link two lazy modules that are first asked for at the same moment.
+import '../../app/shell/staff-shell';
+import './pages/shop-page';
 import { faultsOfAccess, owner, refusal, serve, show } from '../../app/testing';
 import type { Shop } from './api/shop';
 import { changesOf } from './components/audit-words';
