@@ -86,16 +86,20 @@ function SearchBox({
   label: string;
 }): ReactElement {
   const [text, setText] = useState(value);
-  const [asked, setAsked] = useState(value);
-  if (value !== asked) {
-    setAsked(value);
-    setText(value);
+  const [seen, setSeen] = useState(value);
+  const [asked, setAsked] = useState<readonly string[]>([value]);
+  // The address follows a moment later. What was asked for from here is old by then and must not replace what has been
+  // typed since; anything else came from outside (a link, the way back) and stands in the field.
+  if (value !== seen) {
+    setSeen(value);
+    if (!asked.includes(value)) setText(value);
+    if (value === asked.at(-1) || !asked.includes(value)) setAsked([value]);
   }
   const pending = useRef<ReturnType<typeof setTimeout> | undefined>(undefined);
   useEffect(() => () => clearTimeout(pending.current), []);
   const ask = (q: string): void => {
     clearTimeout(pending.current);
-    setAsked(q.trim());
+    setAsked((before) => [...before, q.trim()]);
     onChange(q.trim());
   };
   return (
