@@ -15,6 +15,10 @@ const fromNode = [
   'WritableStream',
   'TransformStream',
   'structuredClone',
+  // Node's Request can't read the files of jsdom.
+  'Blob',
+  'File',
+  'FormData',
 ];
 
 export default class BrowserEnvironment extends TestEnvironment {

@@ -3617,6 +3617,15 @@ export interface components {
       items: components['schemas']['MoveDto'][];
       total: number;
     };
+    NamedSupplierDto: {
+      leadTimeDays?: number | null;
+      name: string;
+      /** @description The one to order from first; at most one of a part's suppliers. */
+      preferred: boolean;
+      /** @description The supplier's code. */
+      supplier: string;
+      supplierPartCode?: string | null;
+    };
     NewDraftDto: {
       /**
        * @description `released` copies the revision in force; `nothing` begins an empty one.
@@ -3905,7 +3914,7 @@ export interface components {
       /** @description The letters that begin the serial numbers of a part followed one by one. */
       serialLetters?: string | null;
       shelfLifeDays?: number | null;
-      suppliers: components['schemas']['PartSupplierDto'][];
+      suppliers: components['schemas']['NamedSupplierDto'][];
       /**
        * @description It stays once something has moved.
        * @enum {string}

@@ -26,7 +26,9 @@ export function serve(handlers: Record<string, Handler>): Call[] {
     const request = input as Request;
     const url = new URL(request.url);
     const text = await request.clone().text();
-    const body: unknown = text ? JSON.parse(text) : undefined;
+    // A form with a file is left as it was sent.
+    const json = request.headers.get('content-type')?.includes('json') ?? false;
+    const body: unknown = text && json ? JSON.parse(text) : text || undefined;
     const route = `${request.method} ${url.pathname}`;
     calls.push({ route, body, headers: request.headers, search: url.searchParams });
     const handler = handlers[route];

@@ -1,3 +1,4 @@
+import { OmitType } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
 import { ArrayMaxSize, IsArray, IsBoolean, IsIn, Matches, ValidateNested } from 'class-validator';
 import { stockMeasureCodes, type StockMeasure } from '@emberlot/shared/measure/stock-measures';
@@ -165,11 +166,11 @@ export class NamedSupplierDto extends PartSupplierDto {
   name: string;
 }
 
-export class PartDto extends PartInputDto {
+export class PartDto extends OmitType(PartInputDto, ['suppliers'] as const) {
   id: number;
   version: number;
   retiredOn: string | null;
   /** Whether measure and the way it is followed stay as they are, because something has moved. */
   moved: boolean;
-  declare suppliers: NamedSupplierDto[];
+  suppliers: NamedSupplierDto[];
 }

@@ -1,3 +1,37 @@
 import type { AreaParts } from '../../lib/area';
 
-export const shelf: AreaParts = { links: [], routes: [] };
+export const shelf: AreaParts = {
+  links: [
+    { label: 'Parts', to: '/shelf/parts' },
+    { label: 'Lots', to: '/shelf/lots' },
+    { label: 'Bins', to: '/shelf/bins' },
+    { label: 'Deliveries', to: '/shelf/deliveries' },
+    { label: 'Moves', to: '/shelf/moves' },
+    { label: 'Suppliers', to: '/shelf/suppliers' },
+    { label: 'Imports', to: '/shelf/imports', roles: ['owner'] },
+  ],
+  routes: [
+    { index: true, lazy: () => import('./pages/queue-page') },
+    { path: 'parts', lazy: () => import('./pages/parts-page') },
+    { path: 'parts/new', lazy: () => import('./pages/new-part-page') },
+    { path: 'parts/:code', lazy: () => import('./pages/part-page') },
+    { path: 'parts/:code/edit', lazy: () => import('./pages/edit-part-page') },
+    { path: 'lots', lazy: () => import('./pages/lots-page') },
+    { path: 'lots/:code', lazy: () => import('./pages/lot-page') },
+    { path: 'bins', lazy: () => import('./pages/bins-page') },
+    { path: 'bins/new', lazy: () => import('./pages/new-bin-page') },
+    { path: 'bins/:code', lazy: () => import('./pages/bin-page') },
+    { path: 'deliveries', lazy: () => import('./pages/deliveries-page') },
+    { path: 'deliveries/new', lazy: () => import('./pages/receive-page') },
+    { path: 'deliveries/:number', lazy: () => import('./pages/delivery-page') },
+    { path: 'moves', lazy: () => import('./pages/moves-page') },
+    { path: 'transfer', lazy: () => import('./pages/transfer-page') },
+    { path: 'adjust', lazy: () => import('./pages/adjust-page') },
+    { path: 'suppliers', lazy: () => import('./pages/suppliers-page') },
+    { path: 'suppliers/new', lazy: () => import('./pages/new-supplier-page') },
+    { path: 'suppliers/:code', lazy: () => import('./pages/supplier-page') },
+    { path: 'suppliers/:code/edit', lazy: () => import('./pages/edit-supplier-page') },
+    { path: 'imports', lazy: () => import('./pages/imports-page') },
+    { path: 'imports/:kind', lazy: () => import('./pages/import-page') },
+  ],
+};
