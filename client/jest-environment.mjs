@@ -16,7 +16,6 @@ const fromNode = [
   'TransformStream',
   'structuredClone',
   // Node's Request can't read the files of jsdom.
-  'Blob',
   'File',
   'FormData',
 ];
